@@ -1,13 +1,11 @@
 using System.Globalization;
-using System.Text;
 
 namespace RegenTrainer.Core.Quantities;
 
 /// <summary>Reads one quantity from left to right and keeps the first fault.</summary>
-internal sealed class QuantityReader(string text, Unit unit)
+internal sealed class QuantityReader(TypedText typed, Unit unit)
 {
-    private readonly int _end = text.TrimEnd().Length;
-    private int _at = text.Length - text.TrimStart().Length;
+    private int _at = typed.Start;
     private string _sign = "";
     private string _whole = "";
     private string _fraction = "";
@@ -17,13 +15,13 @@ internal sealed class QuantityReader(string text, Unit unit)
     /// <summary>Why the text could not be read.</summary>
     public QuantityFault Fault { get; private set; }
 
-    private char Here => At(_at);
+    private char Here => typed.At(_at);
 
     /// <summary>Reads the text; on a fault gives 0.</summary>
     public bool TryRead(out double value)
     {
         value = 0.0;
-        if (unit == Unit.Metre && Word(_at).StartsWith("AWG", StringComparison.OrdinalIgnoreCase))
+        if (unit == Unit.Metre && typed.Word(_at).StartsWith("AWG", StringComparison.OrdinalIgnoreCase))
         {
             return TryGauge(out value);
         }
@@ -52,18 +50,18 @@ internal sealed class QuantityReader(string text, Unit unit)
             _fraction = Digits();
             if (_fraction.Length == 0)
             {
-                return Refuse(_at, Describe(_at), "a digit after the point");
+                return Refuse(_at, typed.Describe(_at), "a digit after the point");
             }
 
             return TryExponent();
         }
 
-        if (char.IsAsciiDigit(At(_at + 1)) && PointPower(Here) is int power)
+        if (char.IsAsciiDigit(typed.At(_at + 1)) && PointPower(Here) is int power)
         {
             if (unit == Unit.Metre && Here == 'm')
             {
-                string typed = (_whole.Length == 0 ? "0" : _whole) + "." + TakeDigits(_at + 1);
-                return Refuse(_at, "`m` in the place of the point", $"{typed} mm or {typed} m");
+                string length = (_whole.Length == 0 ? "0" : _whole) + "." + typed.Digits(_at + 1);
+                return Refuse(_at, "`m` in the place of the point", $"{length} mm or {length} m");
             }
 
             _at++;
@@ -73,7 +71,7 @@ internal sealed class QuantityReader(string text, Unit unit)
             return true;
         }
 
-        return _whole.Length > 0 ? TryExponent() : Refuse(_at, Describe(_at), UnitSigns.Example(unit));
+        return _whole.Length > 0 ? TryExponent() : Refuse(_at, typed.Describe(_at), UnitSigns.Example(unit));
     }
 
     private bool TryExponent()
@@ -83,11 +81,11 @@ internal sealed class QuantityReader(string text, Unit unit)
             return true;
         }
 
-        bool negative = At(_at + 1) == '-';
-        int first = At(_at + 1) is '-' or '+' ? _at + 2 : _at + 1;
-        if (!char.IsAsciiDigit(At(first)))
+        bool negative = typed.At(_at + 1) == '-';
+        int first = typed.At(_at + 1) is '-' or '+' ? _at + 2 : _at + 1;
+        if (!char.IsAsciiDigit(typed.At(first)))
         {
-            return Refuse(first, Describe(first), "the digits of a power of ten");
+            return Refuse(first, typed.Describe(first), "the digits of a power of ten");
         }
 
         _at = first;
@@ -102,30 +100,30 @@ internal sealed class QuantityReader(string text, Unit unit)
     /// <summary>Reads prefix and unit, of which either or both may be missing.</summary>
     private bool TryUnit()
     {
-        int wordAt = SkipBlanks(_at);
-        if (wordAt == _end)
+        int wordAt = typed.SkipBlanks(_at);
+        if (wordAt == typed.End)
         {
             return true;
         }
 
-        if (Word(wordAt).StartsWith("meg", StringComparison.OrdinalIgnoreCase))
+        if (typed.Word(wordAt).StartsWith("meg", StringComparison.OrdinalIgnoreCase))
         {
-            return Refuse(wordAt, $"`{Word(wordAt)}`", "M for mega");
+            return Refuse(wordAt, $"`{typed.Word(wordAt)}`", "M for mega");
         }
 
         int furthest = AfterUnit(wordAt);
-        if (furthest == _end)
+        if (furthest == typed.End)
         {
             return true;
         }
 
         int afterPrefix = wordAt;
-        if (!_coded && UnitSigns.Power(text[wordAt], unit) is int power)
+        if (!_coded && UnitSigns.Power(typed.At(wordAt), unit) is int power)
         {
             // 10k ohm is one quantity; 5 m m is not.
-            afterPrefix = wordAt == _at ? SkipBlanks(wordAt + 1) : wordAt + 1;
+            afterPrefix = wordAt == _at ? typed.SkipBlanks(wordAt + 1) : wordAt + 1;
             furthest = Math.Max(furthest, AfterUnit(afterPrefix));
-            if (furthest == _end)
+            if (furthest == typed.End)
             {
                 _power += power;
                 return true;
@@ -139,16 +137,16 @@ internal sealed class QuantityReader(string text, Unit unit)
     {
         // Any prefix may stand before a wrong unit, even where the wanted one takes none.
         int behindLetter = afterPrefix > wordAt ? afterPrefix : wordAt + 1;
-        bool prefixed = UnitSigns.Power(text[wordAt], Unit.Ohm) is not null;
+        bool prefixed = UnitSigns.Power(typed.At(wordAt), Unit.Ohm) is not null;
         foreach (int at in prefixed ? [wordAt, behindLetter] : new[] { wordAt })
         {
-            if (at < _end && UnitSigns.OtherUnit(Word(at), unit) is Unit other)
+            if (at < typed.End && UnitSigns.OtherUnit(typed.Word(at), unit) is Unit other)
             {
                 return Refuse(at, UnitSigns.Name(other), UnitSigns.Name(unit));
             }
         }
 
-        string expected = (furthest, text[furthest]) switch
+        string expected = (furthest, typed.At(furthest)) switch
         {
             (_, 'P') when furthest == wordAt => "p for pico",
             (_, 'N') when furthest == wordAt => "n for nano",
@@ -157,7 +155,7 @@ internal sealed class QuantityReader(string text, Unit unit)
             _ when furthest > Math.Max(wordAt, afterPrefix) || unit == Unit.None => "the end of the value",
             _ => UnitSigns.Name(unit) + " or the end of the value",
         };
-        return Refuse(furthest, Describe(furthest), expected);
+        return Refuse(furthest, typed.Describe(furthest), expected);
     }
 
     private bool TryCompose(int start, out double value)
@@ -182,18 +180,18 @@ internal sealed class QuantityReader(string text, Unit unit)
     private bool TryGauge(out double value)
     {
         value = 0.0;
-        int numberAt = SkipBlanks(_at + 3);
+        int numberAt = typed.SkipBlanks(_at + 3);
         _at = numberAt;
         string digits = Digits();
         const string Expected = "a wire number from 0000 to 40";
         if (digits.Length == 0)
         {
-            return Refuse(_at, Describe(_at), Expected);
+            return Refuse(_at, typed.Describe(_at), Expected);
         }
 
-        if (_at != _end)
+        if (_at != typed.End)
         {
-            return Refuse(_at, Describe(_at), "the end of the wire number");
+            return Refuse(_at, typed.Describe(_at), "the end of the wire number");
         }
 
         bool zeros = digits.Trim('0').Length == 0;
@@ -216,8 +214,8 @@ internal sealed class QuantityReader(string text, Unit unit)
     /// <summary>What to write in place of a decimal comma, built from what was typed.</summary>
     private string CommaAdvice()
     {
-        string after = TakeDigits(_at + 1);
-        string rest = text[(_at + 1 + after.Length).._end];
+        string after = typed.Digits(_at + 1);
+        string rest = typed.From(_at + 1 + after.Length).ToString();
         string pointed = _sign + _whole + "." + after + rest;
         if (after.Length == 0 || !QuantityText.TryRead(pointed, unit, out double value, out _))
         {
@@ -243,7 +241,7 @@ internal sealed class QuantityReader(string text, Unit unit)
         int longest = 0;
         foreach (string spelling in UnitSigns.Spellings(unit))
         {
-            if (spelling.Length > longest && text.AsSpan(at, _end - at).StartsWith(spelling, StringComparison.Ordinal))
+            if (spelling.Length > longest && typed.From(at).StartsWith(spelling, StringComparison.Ordinal))
             {
                 longest = spelling.Length;
             }
@@ -254,71 +252,14 @@ internal sealed class QuantityReader(string text, Unit unit)
 
     private string Digits()
     {
-        string digits = TakeDigits(_at);
+        string digits = typed.Digits(_at);
         _at += digits.Length;
         return digits;
     }
-
-    private string TakeDigits(int at)
-    {
-        int end = at;
-        while (char.IsAsciiDigit(At(end)))
-        {
-            end++;
-        }
-
-        return text[at..end];
-    }
-
-    private int SkipBlanks(int at)
-    {
-        int next = at;
-        while (next < _end && char.IsWhiteSpace(text[next]))
-        {
-            next++;
-        }
-
-        return next;
-    }
-
-    private string Word(int at)
-    {
-        int end = at;
-        while (end < _end && !char.IsWhiteSpace(text[end]) && !char.IsAsciiDigit(text[end]))
-        {
-            end++;
-        }
-
-        return at < end ? text[at..end] : "";
-    }
-
-    private char At(int at) => at < _end ? text[at] : '\0';
 
     private bool Refuse(int at, string found, string expected)
     {
         Fault = new QuantityFault(at, Printable.Text(found), expected);
         return false;
-    }
-
-    private string Describe(int at)
-    {
-        if (at >= _end)
-        {
-            return text.AsSpan(0, _end).IsWhiteSpace() ? "nothing" : "the end";
-        }
-
-        if (text[at] == ',')
-        {
-            return "a comma";
-        }
-
-        if (char.IsWhiteSpace(text[at]))
-        {
-            return "a blank";
-        }
-
-        string shown = Rune.TryGetRuneAt(text, at, out Rune rune) ? rune.ToString() : text[at].ToString();
-        bool hidden = Printable.Text(shown) != shown;
-        return hidden ? $"the character U+{(rune == default ? text[at] : rune.Value):X4}" : $"`{shown}`";
     }
 }

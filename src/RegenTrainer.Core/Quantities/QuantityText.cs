@@ -17,7 +17,7 @@ public static class QuantityText
     public static bool TryRead(string text, Unit unit, out double value, out QuantityFault fault)
     {
         ArgumentNullException.ThrowIfNull(text);
-        QuantityReader reader = new(text, unit);
+        QuantityReader reader = new(new TypedText(text), unit);
         bool read = reader.TryRead(out value);
         fault = read ? default : reader.Fault;
         return read;
