@@ -39,19 +39,24 @@ public sealed class MedhurstTablesTests
         Assert.Equal(1.0 + (0.04 * c), MedhurstTables.ProximityFactor(0.2, lengthOverDiameter), 0.013);
     }
 
-    // [Medhurst 1947], entries from memory, a few of each region.
+    // [Medhurst 1947], all entries, from memory; columns l/D = 0, 0.2, 0.4, 0.6, 0.8, 1, 2, 4, 6, 8, 10 and endless.
     [Theory]
-    [InlineData(1.0, 0.0, 5.31)]
-    [InlineData(1.0, 0.8, 5.80)]
-    [InlineData(0.9, 1.0, 4.10)]
-    [InlineData(0.7, 1.0, 2.47)]
-    [InlineData(0.6, 2.0, 1.98)]
-    [InlineData(0.5, 4.0, 1.78)]
-    [InlineData(0.4, 0.4, 1.33)]
-    [InlineData(0.8, 10.0, 2.65)]
-    [InlineData(0.1, 0.0, 1.02)]
-    public void Entries_are_met_exactly(double wireOverPitch, double lengthOverDiameter, double phi) =>
-        Assert.Equal(phi, MedhurstTables.ProximityFactor(wireOverPitch, lengthOverDiameter), 1e-12);
+    [InlineData(1.0, new[] { 5.31, 5.45, 5.65, 5.8, 5.8, 5.55, 4.1, 3.54, 3.31, 3.2, 3.23, 3.41 })]
+    [InlineData(0.9, new[] { 3.73, 3.84, 3.99, 4.11, 4.17, 4.1, 3.36, 3.05, 2.92, 2.9, 2.93, 3.11 })]
+    [InlineData(0.8, new[] { 2.74, 2.83, 2.97, 3.1, 3.2, 3.17, 2.74, 2.6, 2.6, 2.62, 2.65, 2.81 })]
+    [InlineData(0.7, new[] { 2.12, 2.2, 2.28, 2.38, 2.44, 2.47, 2.32, 2.27, 2.29, 2.34, 2.37, 2.51 })]
+    [InlineData(0.6, new[] { 1.74, 1.77, 1.83, 1.89, 1.92, 1.94, 1.98, 2.01, 2.03, 2.08, 2.1, 2.22 })]
+    [InlineData(0.5, new[] { 1.44, 1.48, 1.54, 1.6, 1.64, 1.67, 1.74, 1.78, 1.8, 1.81, 1.83, 1.93 })]
+    [InlineData(0.4, new[] { 1.26, 1.29, 1.33, 1.38, 1.42, 1.45, 1.5, 1.54, 1.56, 1.57, 1.58, 1.65 })]
+    [InlineData(0.3, new[] { 1.16, 1.19, 1.21, 1.22, 1.23, 1.24, 1.28, 1.32, 1.34, 1.34, 1.35, 1.4 })]
+    [InlineData(0.2, new[] { 1.07, 1.08, 1.08, 1.1, 1.1, 1.1, 1.13, 1.15, 1.16, 1.16, 1.17, 1.19 })]
+    [InlineData(0.1, new[] { 1.02, 1.02, 1.03, 1.03, 1.03, 1.03, 1.04, 1.04, 1.04, 1.04, 1.04, 1.05 })]
+    public void Entries_are_met_exactly(double wireOverPitch, double[] row)
+    {
+        double[] lengths = [0.0, 0.2, 0.4, 0.6, 0.8, 1.0, 2.0, 4.0, 6.0, 8.0, 10.0, double.PositiveInfinity];
+        Assert.Equal(lengths.Length, row.Length);
+        Assert.All(lengths.Zip(row), entry => Assert.Equal(entry.Second, MedhurstTables.ProximityFactor(wireOverPitch, entry.First), 1e-12));
+    }
 
     // Half way between four entries, by hand: (1.74 + 1.78 + 1.98 + 2.01)/4.
     [Fact]
@@ -72,18 +77,40 @@ public sealed class MedhurstTablesTests
         Assert.Equal(1.04, MedhurstTables.ProximityFactor(0.02, 2.0), 1e-12);
 
     // [Medhurst 1947] self-capacitance in pF of a coil one cm wide (from memory). The other remembered form,
-    // 0.1126 l/D + 0.08 + 0.27/sqrt(l/D), differs from it by up to 8 %.
+    // 0.1126 l/D + 0.08 + 0.27/sqrt(l/D), differs from it by up to 8 %, in both directions.
     [Theory]
     [InlineData(50.0, 5.8)]
+    [InlineData(40.0, 4.6)]
+    [InlineData(30.0, 3.4)]
+    [InlineData(25.0, 2.9)]
     [InlineData(20.0, 2.36)]
+    [InlineData(15.0, 1.86)]
     [InlineData(10.0, 1.32)]
+    [InlineData(9.0, 1.22)]
+    [InlineData(8.0, 1.12)]
+    [InlineData(7.0, 1.01)]
+    [InlineData(6.0, 0.92)]
     [InlineData(5.0, 0.81)]
+    [InlineData(4.5, 0.77)]
     [InlineData(4.0, 0.72)]
-    [InlineData(2.0, 0.50)]
+    [InlineData(3.5, 0.67)]
+    [InlineData(3.0, 0.61)]
+    [InlineData(2.5, 0.56)]
+    [InlineData(2.0, 0.5)]
+    [InlineData(1.5, 0.47)]
     [InlineData(1.0, 0.46)]
+    [InlineData(0.9, 0.46)]
     [InlineData(0.8, 0.46)]
-    [InlineData(0.5, 0.50)]
+    [InlineData(0.7, 0.47)]
+    [InlineData(0.6, 0.48)]
+    [InlineData(0.5, 0.5)]
+    [InlineData(0.45, 0.52)]
+    [InlineData(0.4, 0.54)]
+    [InlineData(0.35, 0.57)]
+    [InlineData(0.3, 0.6)]
     [InlineData(0.25, 0.64)]
+    [InlineData(0.2, 0.7)]
+    [InlineData(0.15, 0.79)]
     [InlineData(0.1, 0.96)]
     public void Self_capacitance_agrees_with_both_published_forms(double lengthOverDiameter, double picofarad)
     {
