@@ -1,0 +1,178 @@
+using RegenTrainer.Core.Quantities;
+
+namespace RegenTrainer.Core.Devices;
+
+/// <summary>
+/// The transport form of the Ebers-Moll law with both junctions [Ebers and Moll 1954; Gray and Meyer 1977], Early's voltage
+/// [Early 1952], a base current that gains a second exponential of emission coefficient 2 at low currents [Sah, Noyce and
+/// Shockley 1957], diffusion charge and junction capacitances.
+/// </summary>
+public sealed class BipolarLaw : IDeviceLaw
+{
+    /// <summary>Temperature in °C at which data sheets state their figures.</summary>
+    public const double DataSheetCelsius = 25;
+
+    /// <summary>Current gain with emitter and collector exchanged: usual for small planar transistors, from memory.</summary>
+    private const double ReverseGain = 5;
+
+    /// <summary>Band gap of silicon in volt [Gray and Meyer 1977].</summary>
+    private const double BandGapVolt = 1.12;
+
+    /// <summary>The saturation current rises as this power of temperature beside the band gap's exponential [Gray and Meyer 1977].</summary>
+    private const double SaturationPower = 3;
+
+    /// <summary>The gain rises as this power of temperature, 0.6 %/K near 25 °C: from memory.</summary>
+    private const double GainPower = 1.75;
+
+    /// <summary>Above this exponent the exponentials go on as straight lines, so that nothing overflows.</summary>
+    private const double LargestExponent = 60;
+
+    /// <summary>The transport factor 1 - v_bc/V_A is held above this where a large forward collector junction would turn it over.</summary>
+    private const double SmallestEarlyFactor = 0.05;
+
+    /// <summary>Collector-emitter voltage in volt at which data sheets state the transition frequency: common practice.</summary>
+    private const double TransitionVolt = 5;
+
+    private readonly double _sign;
+    private readonly double _thermalVolt;
+    private readonly double _saturation;
+    private readonly double _inverseGain;
+    private readonly double _recombination;
+    private readonly double _earlyVolt;
+    private readonly double _transitSeconds;
+    private readonly double _criticalVolt;
+    private readonly JunctionCapacitance _emitterJunction;
+    private readonly JunctionCapacitance _collectorJunction;
+
+    /// <summary>The law of one grade at one temperature.</summary>
+    /// <param name="model">The type.</param>
+    /// <param name="grade">Weak takes the low gain, transition frequency and saturation current and the high capacitances; strong the opposite.</param>
+    /// <param name="temperatureCelsius">Junction temperature in °C, -100 to 200.</param>
+    /// <exception cref="ArgumentOutOfRangeException">The temperature is outside its range.</exception>
+    public BipolarLaw(BipolarModel model, Grade grade, double temperatureCelsius)
+    {
+        Guard.InRange(temperatureCelsius, -100, 200, nameof(temperatureCelsius));
+        _sign = model.Polarity == Polarity.Npn ? 1 : -1;
+        _thermalVolt = PhysicalConstants.ThermalVoltage(temperatureCelsius);
+        double cold = DataSheetCelsius + PhysicalConstants.ZeroCelsius, now = temperatureCelsius + PhysicalConstants.ZeroCelsius;
+        double coldThermal = PhysicalConstants.ThermalVoltage(DataSheetCelsius);
+        double coldSaturation = model.SaturationCurrent.RisingWith(grade);
+        double rise = Math.Pow(now / cold, SaturationPower) * Math.Exp(BandGapVolt * ((1 / coldThermal) - (1 / _thermalVolt)));
+        double gainRise = Math.Pow(now / cold, GainPower);
+        _saturation = coldSaturation * rise;
+
+        // 1/gain = 1/ideal + K/sqrt(collector current): two points give both, exactly.
+        double gain = model.CurrentGain.RisingWith(grade), gainAt = model.CurrentGain.At ?? 1e-3;
+        double slope = 0;
+        if (model.CurrentGainLow is { At: { } lowAt } low && lowAt < gainAt)
+        {
+            double lowGain = low.Typical * gain / model.CurrentGain.Typical;
+            slope = Math.Max(0, ((1 / lowGain) - (1 / gain)) / ((1 / Math.Sqrt(lowAt)) - (1 / Math.Sqrt(gainAt))));
+        }
+
+        _inverseGain = ((1 / gain) - (slope / Math.Sqrt(gainAt))) / gainRise;
+        _recombination = slope * Math.Sqrt(coldSaturation) * Math.Sqrt(rise) / gainRise;
+        _earlyVolt = model.EarlyVoltage.Typical;
+        _emitterJunction = JunctionCapacitance.FromReverse(model.InputCapacitance.FallingWith(grade), model.InputCapacitance.At ?? 0.5);
+        _collectorJunction = JunctionCapacitance.FromReverse(model.OutputCapacitance.FallingWith(grade), model.OutputCapacitance.At ?? 5);
+
+        // tau = 1/(2 pi f_T) - (C_je + C_jc) V_T/I at the current the transition frequency is stated for.
+        double transition = model.TransitionFrequency.RisingWith(grade), transitionAt = model.TransitionFrequency.At ?? 1e-2;
+        double baseVolt = coldThermal * Math.Log(transitionAt / coldSaturation);
+        double junctions = _emitterJunction.At(baseVolt).Farad + _collectorJunction.At(baseVolt - TransitionVolt).Farad;
+        double transit = (1 / (2 * Math.PI * transition)) - (junctions * coldThermal / transitionAt);
+        IsTransitTimeClamped = transit < 0;
+        _transitSeconds = Math.Max(0, transit);
+        _criticalVolt = _thermalVolt * Math.Log(_thermalVolt / (Math.Sqrt(2) * _saturation));
+    }
+
+    /// <summary>Whether the stated capacitances alone are slower than the stated transition frequency, so that no transit time is left.</summary>
+    public bool IsTransitTimeClamped { get; }
+
+    /// <inheritdoc/>
+    public TwoPortPoint Evaluate(double v1, double v2)
+    {
+        double baseEmitter = _sign * v1, baseCollector = _sign * (v1 - v2);
+        double half = Exponential(0.5 * baseEmitter / _thermalVolt, out double halfSlope);
+        (double forward, double forwardSlope) = 0.5 * baseEmitter / _thermalVolt < LargestExponent / 2
+            ? (half * half, half * half)
+            : (Exponential(baseEmitter / _thermalVolt, out double s), s);
+        double reverse = Exponential(baseCollector / _thermalVolt, out double reverseSlope);
+
+        double forwardAmpere = _saturation * (forward - 1), reverseAmpere = _saturation * (reverse - 1);
+        double forwardSiemens = _saturation * forwardSlope / _thermalVolt, reverseSiemens = _saturation * reverseSlope / _thermalVolt;
+        double early = 1 - (baseCollector / _earlyVolt);
+        bool held = early < SmallestEarlyFactor;
+        early = held ? SmallestEarlyFactor : early;
+        double byEarly = held ? 0 : -(forwardAmpere - reverseAmpere) / _earlyVolt;
+
+        // Derivatives by the two junction voltages first, then by the port voltages: v_be = v1, v_bc = v1 - v2.
+        double transport = (forwardAmpere - reverseAmpere) * early;
+        double transportByEmitter = forwardSiemens * early, transportByCollector = (-reverseSiemens * early) + byEarly;
+        double emitterBase = (forwardAmpere * _inverseGain) + (_recombination * (half - 1));
+        double emitterBaseSiemens = (forwardSiemens * _inverseGain) + (_recombination * 0.5 * halfSlope / _thermalVolt);
+        double collectorBase = reverseAmpere / ReverseGain, collectorBaseSiemens = reverseSiemens / ReverseGain;
+
+        (double emitterCharge, double emitterFarad) = _emitterJunction.At(baseEmitter);
+        (double collectorCharge, double collectorFarad) = _collectorJunction.At(baseCollector);
+        emitterCharge += _transitSeconds * forwardAmpere;
+        emitterFarad += _transitSeconds * forwardSiemens;
+        return new TwoPortPoint(
+            _sign * (emitterBase + collectorBase),
+            _sign * (transport - collectorBase),
+            emitterBaseSiemens + collectorBaseSiemens,
+            -collectorBaseSiemens,
+            transportByEmitter + transportByCollector - collectorBaseSiemens,
+            collectorBaseSiemens - transportByCollector,
+            _sign * (emitterCharge + collectorCharge),
+            -_sign * collectorCharge,
+            emitterFarad + collectorFarad,
+            -collectorFarad,
+            -collectorFarad,
+            collectorFarad);
+    }
+
+    /// <inheritdoc/>
+    public bool LimitStep(double v1Old, double v2Old, ref double v1New, ref double v2New)
+    {
+        double emitter = Limit(_sign * v1Old, _sign * v1New), collector = Limit(_sign * (v1Old - v2Old), _sign * (v1New - v2New));
+        if (emitter == _sign * v1New && collector == _sign * (v1New - v2New))
+        {
+            return false;
+        }
+
+        (v1New, v2New) = (_sign * emitter, _sign * (emitter - collector));
+        return true;
+    }
+
+    private static double Exponential(double x, out double slope)
+    {
+        if (x < LargestExponent)
+        {
+            return slope = Math.Exp(x);
+        }
+
+        slope = Math.Exp(LargestExponent);
+        return slope * (1 + x - LargestExponent);
+    }
+
+    /// <summary>
+    /// Above the voltage where the exponential bends most sharply against a straight line, a step takes the new current as
+    /// the linearised one rather than the exponential of the new voltage (logarithmic damping of junction steps).
+    /// </summary>
+    private double Limit(double before, double after)
+    {
+        if (after <= _criticalVolt || Math.Abs(after - before) <= 2 * _thermalVolt)
+        {
+            return after;
+        }
+
+        if (before <= 0)
+        {
+            return _criticalVolt;
+        }
+
+        double argument = 1 + ((after - before) / _thermalVolt);
+        return argument > 0 ? before + (_thermalVolt * Math.Log(argument)) : _criticalVolt;
+    }
+}
