@@ -33,6 +33,26 @@ public sealed class BiasTests
         Assert.Equal(0.69800691035092162, oracle.OperatingPorts("q").Control, 1e-8);
     }
 
+    /// <summary>
+    /// V_CE = V_T ln{[1 + (I_C/I_B)(1 - a_R)] / (a_R [1 - (I_C/I_B)(1 - a_F)/a_F])} [Ebers and Moll 1954] at I_C/I_B = 11.64752,
+    /// V_T 25 mV, a_F 200/201, a_R 4/5.
+    /// </summary>
+    [Fact]
+    public void A_saturated_transistor_leaves_the_voltage_of_Ebers_and_Moll()
+    {
+        Part[] parts =
+        [
+            new Supply("battery", "plus", Part.Earth, 5, 0),
+            new Resistor("rb", "plus", "base", 10e3),
+            new Resistor("rc", "plus", "collector", 1e3),
+        ];
+        OracleDevice device = new("q", "base", "collector", Part.Earth, 0, new TwoJunctionLaw());
+        var oracle = new CarrierLevelOracle(parts, Grade.Typical, 20, 1e6, [device]);
+        Assert.Equal(0.03714923656, oracle.OperatingVolt("collector"), 1e-9);
+        double ratio = (5 - oracle.OperatingVolt("collector")) / (5 - oracle.OperatingVolt("base")) * 10;
+        Assert.Equal(11.6475246, ratio, 1e-6);
+    }
+
     [Fact]
     public void A_stage_left_alone_stays_where_it_stands()
     {

@@ -1,4 +1,5 @@
 using RegenTrainer.Core.Circuits;
+using RegenTrainer.Core.Coils;
 using RegenTrainer.Core.Devices;
 
 namespace RegenTrainer.Core.Tests.Oracles;
@@ -71,5 +72,81 @@ public sealed class LargeSignalTests
         DecayReading stepped = DecayFit.Fit(samples.Volt["top"].AsSpan(200 * 120), 1e6, 120);
         Assert.Equal(linear.GrowthPerS, stepped.GrowthPerS, 1e-3);
         Assert.Equal(linear.Hz, stepped.Hz, 1e-3);
+    }
+
+    /// <summary>
+    /// Bias current held, the drive x in units of V_T settles where 2 I1(x)/(x I0(x)) = 1/loop gain [Clarke and Hess 1971];
+    /// roots computed elsewhere.
+    /// </summary>
+    [Theory]
+    [InlineData(1.1, 0.90945)]
+    [InlineData(1.2, 1.30773)]
+    public void An_oscillator_at_constant_current_settles_where_its_loop_gain_is_one(double loopGain, double drive)
+    {
+        // 40 mS (1 mA, 25 mV), a twentieth of the tank's voltage fed back in phase, 500 ohm x loop gain across 2 ohm of reactance.
+        const double thermal = 0.025;
+        const double henry = 2 / (2 * Math.PI * 1e6);
+        var coils = new FixedWindings(new[,] { { henry, henry / 20 }, { henry / 20, henry / 100 } }, new double[2, 2], []);
+        Part[] parts =
+        [
+            new Supply("plus", "plus", Part.Earth, 9, 0),
+            new Supply("minus", "minus", Part.Earth, -1000.69077527789821368, 0),   // 1 mA through 1 megohm below V_BE = 25 mV ln 1e12
+            new Resistor("tail", "minus", "emitter", 1e6),
+            new Capacitor("bypass", "emitter", Part.Earth, 1e-6),
+            new Capacitor("c", "collector", "plus", 1 / (2 * Math.PI * 1e6 * 2)) { Role = PartRole.Tuning },
+            new Resistor("loss", "collector", "plus", 500 * loopGain),
+            new Windings("coil", [("plus", "collector"), ("base", Part.Earth)], coils),
+        ];
+        OracleDevice device = new("q", "base", "collector", "emitter", 0, new ExponentialLaw(1e-15, thermal, 1e9));
+        var oracle = new CarrierLevelOracle(parts, Grade.Typical, 20, 1e6, [device]);
+        Assert.Equal(1e-3, oracle.OperatingAmpere("minus"), 1e-9);
+        double[] volt = oracle.Run(new OracleRun(1e-6 / 120, 4500 * 120) { KickAmpere = CarrierLevelOracle.Burst(1e6, 0.02), Nodes = ["base"] }).Volt["base"];
+        double late = volt.Skip(4400 * 120).Max();
+        Assert.Equal(volt.Skip(4000 * 120).Take(100 * 120).Max(), late, late * 1e-3);
+        Assert.Equal(drive, late / thermal, drive * 0.01);
+    }
+
+    [Fact]
+    public void A_saturating_oscillator_is_met_to_second_order_in_the_step()
+    {
+        const double henry = 20 / (2 * Math.PI * 1e6);
+        var coils = new FixedWindings(
+            new[,] { { henry, henry / 20 }, { henry / 20, henry / 100 } },
+            new[,] { { 0.1, 0.0 }, { 0.0, 0.01 } },
+            [new WindingSpan(0, 1, 5e-12, 1, 10)]);
+        Part[] parts =
+        [
+            new Supply("plus", "plus", Part.Earth, 1.5, 1),
+            new Capacitor("bypass", "plus", Part.Earth, 1e-7, 500),
+            new Resistor("bias", "plus", "foot", 100e3),
+            new Capacitor("decouple", "foot", Part.Earth, 1e-8, 500),
+            new Capacitor("c", "collector", "plus", 1 / (2 * Math.PI * 1e6 * 20), 500) { Role = PartRole.Tuning },
+            new Windings("coil", [("plus", "collector"), ("base", "foot")], coils),
+        ];
+        OracleDevice device = new("q", "base", "collector", Part.Earth, 30, new TwoJunctionLaw(0.5e-9, 20e-12, 4e-12));
+        var oracle = new CarrierLevelOracle(parts, Grade.Typical, 20, 1e6, [device]);
+        Assert.True(oracle.SmallSignalRing("collector", 1e6, 100, 120).GrowthPerS > 0);
+        double Amplitude(int perCycle)
+        {
+            const int cycles = 600;
+            double[] volt = oracle.Run(new OracleRun(1e-6 / perCycle, cycles * perCycle)
+            {
+                KickAmpere = CarrierLevelOracle.Burst(1e6, 1e-4),
+                Nodes = ["collector"],
+            }).Volt["collector"];
+            ReadOnlySpan<double> late = volt.AsSpan((cycles - 20) * perCycle);
+            double sum = 0;
+            foreach (double v in late)
+            {
+                sum += (v - oracle.OperatingVolt("plus")) * (v - oracle.OperatingVolt("plus"));
+            }
+
+            return Math.Sqrt(2 * sum / late.Length);
+        }
+
+        double[] found = [Amplitude(120), Amplitude(240), Amplitude(480)];
+        Assert.InRange(found[2], 1.3, 1.65);   // the collector swings between the supply's double and a little below earth
+        Assert.True(Math.Abs(found[1] - found[2]) < 1e-3 * found[2], string.Join(" ", found));
+        Assert.True(Math.Abs(found[0] - found[1]) < 3e-3 * found[2], string.Join(" ", found));
     }
 }

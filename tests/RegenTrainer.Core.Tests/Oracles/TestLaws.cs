@@ -39,3 +39,38 @@ internal sealed record CubicLaw(double Siemens, double Volt, double Farad = 0, d
 
     public bool LimitStep(double oldV1, double oldV2, ref double newV1, ref double newV2) => false;
 }
+
+/// <summary>
+/// A transistor with both junctions (transport form) and 25 mV: I_S 1e-15 A, gains 200 and 4, a transit time, and constant
+/// junction capacitances [Ebers and Moll 1954].
+/// </summary>
+internal sealed record TwoJunctionLaw(double TransitSecond = 0, double EmitterFarad = 0, double CollectorFarad = 0) : IDeviceLaw
+{
+    private const double Thermal = 0.025;
+    private const double Saturation = 1e-15;
+    private const double Forward = 200;
+    private const double Reverse = 4;
+
+    public TwoPortPoint Evaluate(double v1, double v2)
+    {
+        double vbc = v1 - v2;
+        (double f, double r) = (Saturation * (Math.Exp(v1 / Thermal) - 1), Saturation * (Math.Exp(vbc / Thermal) - 1));
+        (double df, double dr) = ((f + Saturation) / Thermal, (r + Saturation) / Thermal);
+        double chargeBc = CollectorFarad * vbc;
+        return new TwoPortPoint(
+            (f / Forward) + (r / Reverse),
+            f - r - (r / Reverse),
+            (df / Forward) + (dr / Reverse),
+            -dr / Reverse,
+            df - dr - (dr / Reverse),
+            dr + (dr / Reverse),
+            (TransitSecond * f) + (EmitterFarad * v1) + chargeBc,
+            -chargeBc,
+            (TransitSecond * df) + EmitterFarad + CollectorFarad,
+            -CollectorFarad,
+            -CollectorFarad,
+            CollectorFarad);
+    }
+
+    public bool LimitStep(double oldV1, double oldV2, ref double newV1, ref double newV2) => false;
+}

@@ -58,11 +58,6 @@ internal sealed class TrapezoidStepper
 
         Matrix<double> left = (_twoOverH * Matrix<double>.Build.DenseOfArray(storage)) + Matrix<double>.Build.DenseOfArray(conductance);
         _inverse = Inverse(left).ToRowMajorArray();
-        if (!Array.TrueForAll(_inverse, double.IsFinite))
-        {
-            throw new InvalidOperationException("the stage's equations are singular: a node floats");
-        }
-
         _storage = Matrix<double>.Build.DenseOfArray(storage).ToRowMajorArray();
         _portResponse = PortResponse();
         (_state, _right) = (new double[_n], new double[_n]);
@@ -141,7 +136,15 @@ internal sealed class TrapezoidStepper
         double[] row = [.. matrix.EnumerateRows().Select(r => 1 / r.AbsoluteMaximum())];
         Matrix<double> scaled = matrix.MapIndexed((i, _, v) => v * row[i]);
         double[] column = [.. scaled.EnumerateColumns().Select(c => 1 / c.AbsoluteMaximum())];
-        Matrix<double> inverse = scaled.MapIndexed((_, j, v) => v * column[j]).LU().Solve(Matrix<double>.Build.DenseIdentity(n));
+        scaled = scaled.MapIndexed((_, j, v) => v * column[j]);
+        Matrix<double> identity = Matrix<double>.Build.DenseIdentity(n);
+        Matrix<double> inverse = scaled.LU().Solve(identity);
+        double error = ((scaled * inverse) - identity).InfinityNorm();
+        if (!(error < 1e-8))
+        {
+            throw new InvalidOperationException("the stage's equations are singular: a node floats");
+        }
+
         return inverse.MapIndexed((i, j, v) => v * column[i] * row[j]);
     }
 
