@@ -22,6 +22,7 @@ internal sealed class TrapezoidStepper
     private readonly double[] _storage;
     private readonly bool[] _algebraic;
     private readonly double[] _portResponse;
+    private readonly double[][] _portColumns;
     private readonly PortExcess[] _excess;
     private readonly double[] _state;
     private readonly double[] _right;
@@ -59,6 +60,7 @@ internal sealed class TrapezoidStepper
         Matrix<double> left = (_twoOverH * Matrix<double>.Build.DenseOfArray(storage)) + Matrix<double>.Build.DenseOfArray(conductance);
         _inverse = Inverse(left).ToRowMajorArray();
         _storage = Matrix<double>.Build.DenseOfArray(storage).ToRowMajorArray();
+        _portColumns = [.. Enumerable.Range(0, _ports).Select(PortColumn)];
         _portResponse = PortResponse();
         (_state, _right) = (new double[_n], new double[_n]);
         (Unknowns, _portDrive, _portVolt) = (new double[_n], new double[_ports], new double[_ports]);
@@ -189,28 +191,32 @@ internal sealed class TrapezoidStepper
         return (port % 2 == 0 ? place.Control : place.Output, place.Common);
     }
 
-    private double Inverse(int row, int column) => row < 0 || column < 0 ? 0 : _inverse[(row * _n) + column];
+    /// <summary>What one ampere through a port from outside does to every unknown.</summary>
+    private double[] PortColumn(int port)
+    {
+        (int plus, int minus) = Port(port);
+        double Entry(int row, int column) => column < 0 ? 0 : _inverse[(row * _n) + column];
+        return [.. Enumerable.Range(0, _n).Select(i => Entry(i, plus) - Entry(i, minus))];
+    }
 
     private double[] PortResponse()
     {
         double[] response = new double[_ports * _ports];
         for (int p = 0; p < _ports; p++)
         {
-            (int plus, int minus) = Port(p);
             for (int q = 0; q < _ports; q++)
             {
-                (int into, int outOf) = Port(q);
-                response[(p * _ports) + q] = Inverse(plus, into) - Inverse(minus, into) - Inverse(plus, outOf) + Inverse(minus, outOf);
+                response[(p * _ports) + q] = AcrossPort(p, _portColumns[q]);
             }
         }
 
         return response;
     }
 
-    private double AcrossPort(int port)
+    private double AcrossPort(int port, double[] unknowns)
     {
         (int plus, int minus) = Port(port);
-        return (plus < 0 ? 0 : Unknowns[plus]) - (minus < 0 ? 0 : Unknowns[minus]);
+        return (plus < 0 ? 0 : unknowns[plus]) - (minus < 0 ? 0 : unknowns[minus]);
     }
 
     private void AddToState(int port, double value)
@@ -232,17 +238,17 @@ internal sealed class TrapezoidStepper
     {
         for (int p = 0; p < _ports; p++)
         {
-            _portDrive[p] = AcrossPort(p);
+            _portDrive[p] = AcrossPort(p, Unknowns);
         }
 
         PortNewton.Solve(_excess, _portResponse, _portDrive, _portVolt);
         for (int p = 0; p < _ports; p++)
         {
-            (int plus, int minus) = Port(p);
+            double[] column = _portColumns[p];
             double current = _excess[p / 2].Flow(p % 2);
             for (int i = 0; i < _n; i++)
             {
-                Unknowns[i] -= (Inverse(i, plus) - Inverse(i, minus)) * current;
+                Unknowns[i] -= column[i] * current;
             }
         }
     }
