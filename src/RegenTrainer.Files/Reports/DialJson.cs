@@ -1,0 +1,31 @@
+using RegenTrainer.Core.Quantities;
+using RegenTrainer.Core.Readings;
+
+namespace RegenTrainer.Files.Reports;
+
+/// <summary>A run along the dial as JSON, schema <c>regentrainer.dial/1</c>.</summary>
+public static class DialJson
+{
+    /// <summary>Writes a run along the dial as UTF-8 text.</summary>
+    /// <param name="stage">The stage's title.</param>
+    /// <param name="setting">The setting that all points share; its dial and station are ignored.</param>
+    /// <param name="stationHz">The station of all points in Hz; null where each point has the station at its dial.</param>
+    /// <param name="points">The points.</param>
+    /// <param name="cautions">Cautions about the run as a whole.</param>
+    public static byte[] Write(
+        string stage, SettingInForce setting, double? stationHz, IReadOnlyList<DialPoint> points, IReadOnlyList<Caution> cautions) =>
+        Report.Write("dial", stage, SettingKeys.Along(setting, stationHz), cautions, writer => writer.List("points", points, Point));
+
+    private static void Point(FigureWriter writer, DialPoint point)
+    {
+        writer.Number("dial_hz", point.DialHz);
+        writer.Flag("reachable", point.Reachable);
+        writer.Number("tuning_farad", point.TuningFarad);
+        writer.Word("tip_over_state", CommonKeys.Word(point.TipOver?.State));
+        writer.Number("tip_over_percent", point.TipOver?.First?.TravelPercent);
+        writer.Number("effective_q", point.EffectiveQ);
+        writer.Number("bandwidth_hz", point.BandwidthHz);
+        writer.Number("stage_gain_db", point.StageGainDb);
+        writer.Number("pulled_hz", point.PulledHz);
+    }
+}
