@@ -187,7 +187,7 @@ public sealed class TappedCoilTests
     [Fact]
     public void Parts_of_the_builders_own_are_added()
     {
-        Resistor damper = new("output damper", "collector", Part.Earth, 10e3);
+        Resistor damper = new("output damper", "collector", RegenTrainer.Core.Circuits.Part.Earth, 10e3);
         StageDesign design = DefaultStage.Design with { ExtraParts = [damper] };
         Assert.Empty(design.Family.Check(design));
         Assert.Same(damper, Expand(design).Parts[^1]);
