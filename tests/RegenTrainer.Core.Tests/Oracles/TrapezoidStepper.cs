@@ -20,6 +20,7 @@ internal sealed class TrapezoidStepper
     private readonly double _twoOverH;
     private readonly double[] _inverse;
     private readonly double[] _storage;
+    private readonly (int Row, int Column, double Value)[] _stored;
     private readonly bool[] _algebraic;
     private readonly double[] _portResponse;
     private readonly double[][] _portColumns;
@@ -60,6 +61,10 @@ internal sealed class TrapezoidStepper
         Matrix<double> left = (_twoOverH * Matrix<double>.Build.DenseOfArray(storage)) + Matrix<double>.Build.DenseOfArray(conductance);
         _inverse = Inverse(left).ToRowMajorArray();
         _storage = Matrix<double>.Build.DenseOfArray(storage).ToRowMajorArray();
+        _stored =
+        [
+            .. Enumerable.Range(0, _n * _n).Where(k => _storage[k] != 0).Select(k => (k / _n, k % _n, _storage[k])),
+        ];
         _portColumns = [.. Enumerable.Range(0, _ports).Select(PortColumn)];
         _portResponse = PortResponse();
         (_state, _right) = (new double[_n], new double[_n]);
@@ -92,13 +97,12 @@ internal sealed class TrapezoidStepper
 
         for (int i = 0; i < _n; i++)
         {
-            double charge = 0;
-            for (int j = 0; j < _n; j++)
-            {
-                charge += _storage[(i * _n) + j] * Unknowns[j];
-            }
+            _state[i] = _algebraic[i] ? 0 : -_state[i];
+        }
 
-            _state[i] = _algebraic[i] ? 0 : (2 * _twoOverH * charge) - _state[i];
+        foreach ((int row, int column, double value) in _stored)
+        {
+            _state[row] += 2 * _twoOverH * value * Unknowns[column];
         }
 
         if (!_linear)
