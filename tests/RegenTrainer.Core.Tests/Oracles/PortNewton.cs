@@ -55,7 +55,8 @@ internal static class PortNewton
                 u[p] -= factor * step[p];
             }
 
-            if (largest < ToleranceVolt || (largest < 1e-10 && largest > before / 2))
+            // A step that shrank a thousandfold leaves an error that much smaller again.
+            if (largest < ToleranceVolt || (largest < 1e-9 && largest < before / 1000) || (largest < 1e-10 && largest > before / 2))
             {
                 for (int d = 0; d < devices.Length; d++)
                 {

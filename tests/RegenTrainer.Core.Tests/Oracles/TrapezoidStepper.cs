@@ -29,6 +29,7 @@ internal sealed class TrapezoidStepper
     private readonly double[] _right;
     private readonly double[] _portDrive;
     private readonly double[] _portVolt;
+    private readonly double[] _portBefore;
 
     internal TrapezoidStepper(OracleCircuit circuit, OracleBias bias, double stepSeconds, bool linear)
     {
@@ -69,6 +70,7 @@ internal sealed class TrapezoidStepper
         _portResponse = PortResponse();
         (_state, _right) = (new double[_n], new double[_n]);
         (Unknowns, _portDrive, _portVolt) = (new double[_n], new double[_ports], new double[_ports]);
+        _portBefore = new double[_ports];
         Sources = new double[_n];
     }
 
@@ -243,6 +245,9 @@ internal sealed class TrapezoidStepper
         for (int p = 0; p < _ports; p++)
         {
             _portDrive[p] = AcrossPort(p, Unknowns);
+            double now = _portVolt[p];
+            _portVolt[p] += Math.Clamp(now - _portBefore[p], -0.01, 0.01);
+            _portBefore[p] = now;
         }
 
         PortNewton.Solve(_excess, _portResponse, _portDrive, _portVolt);
