@@ -16,10 +16,13 @@ public sealed class LuPlan
     /// <summary>An entry below this fraction of the largest in its column is no candidate for a pivot.</summary>
     private const double PivotThreshold = 0.05;
 
-    private LuPlan(int size, int entryCount, int valueCount, int[] pivotRow, int[] pivotColumn, int[] diagonal,
+    /// <summary>The same while late unknowns are still held back: a little less choosy, since they may not help out.</summary>
+    private const double HeadThreshold = 0.001;
+
+    private LuPlan(int size, int entryCount, int valueCount, int headSteps, int[] pivotRow, int[] pivotColumn, int[] diagonal,
         int[] lowerStart, int[] lower, int[] lowerRow, int[] upperStart, int[] upper, int[] upperColumn, int[] target)
     {
-        (Size, EntryCount, ValueCount) = (size, entryCount, valueCount);
+        (Size, EntryCount, ValueCount, HeadSteps) = (size, entryCount, valueCount, headSteps);
         (PivotRow, PivotColumn, Diagonal) = (pivotRow, pivotColumn, diagonal);
         (LowerStart, Lower, LowerRow) = (lowerStart, lower, lowerRow);
         (UpperStart, Upper, UpperColumn, Target) = (upperStart, upper, upperColumn, target);
@@ -33,6 +36,9 @@ public sealed class LuPlan
 
     /// <summary>Number of places a value array needs: entries and fill-in.</summary>
     public int ValueCount { get; }
+
+    /// <summary>Number of first steps that touch no entry between two late unknowns other than by their result.</summary>
+    public int HeadSteps { get; }
 
     internal int[] PivotRow { get; }
 
@@ -60,9 +66,11 @@ public sealed class LuPlan
     /// <param name="columns">Column of each entry.</param>
     /// <param name="entries">A typical set of values: cancellations in them are the network's own.</param>
     /// <param name="blamed">The unknown whose column has no entry left where the matrix is structurally singular; -1 otherwise.</param>
+    /// <param name="late">Unknowns whose rows and columns are eliminated last; empty for none.</param>
     /// <returns>The plan, or null where the matrix is singular.</returns>
     public static LuPlan? TryFind(
-        int size, ReadOnlySpan<int> rows, ReadOnlySpan<int> columns, ReadOnlySpan<Complex> entries, out int blamed)
+        int size, ReadOnlySpan<int> rows, ReadOnlySpan<int> columns, ReadOnlySpan<Complex> entries, out int blamed,
+        ReadOnlySpan<int> late = default)
     {
         // A dense trial elimination steers: networks have tens of unknowns, and plans are found once.
         int[,] place = new int[size, size];
@@ -82,16 +90,28 @@ public sealed class LuPlan
         }
 
         int next = rows.Length;
-        bool[] rowDone = new bool[size], columnDone = new bool[size];
+        bool[] rowDone = new bool[size], columnDone = new bool[size], heldBack = new bool[size];
+        foreach (int unknown in late)
+        {
+            heldBack[unknown] = true;
+        }
+
+        int headSteps = late.IsEmpty ? size : 0;
+        bool head = !late.IsEmpty;
         int[] pivotRow = new int[size], pivotColumn = new int[size], diagonal = new int[size];
         int[] lowerStart = new int[size + 1], upperStart = new int[size + 1];
         List<int> lower = [], lowerRow = [], upper = [], upperColumn = [], target = [];
         for (int step = 0; step < size; step++)
         {
-            (int pr, int pc) = ChoosePivot(size, place, value, rowDone, columnDone, out blamed);
+            (int pr, int pc) = head ? ChoosePivot(size, place, value, rowDone, columnDone, heldBack, HeadThreshold, out blamed) : (-1, -1);
             if (pr < 0)
             {
-                return null;
+                (headSteps, head) = (head ? step : headSteps, false);
+                (pr, pc) = ChoosePivot(size, place, value, rowDone, columnDone, new bool[size], PivotThreshold, out blamed);
+                if (pr < 0)
+                {
+                    return null;
+                }
             }
 
             (pivotRow[step], pivotColumn[step], diagonal[step]) = (pr, pc, place[pr, pc]);
@@ -134,12 +154,12 @@ public sealed class LuPlan
         }
 
         blamed = -1;
-        return new LuPlan(size, rows.Length, next, pivotRow, pivotColumn, diagonal, lowerStart, [.. lower], [.. lowerRow],
+        return new LuPlan(size, rows.Length, next, headSteps, pivotRow, pivotColumn, diagonal, lowerStart, [.. lower], [.. lowerRow],
             upperStart, [.. upper], [.. upperColumn], [.. target]);
     }
 
     private static (int Row, int Column) ChoosePivot(
-        int size, int[,] place, Complex[,] value, bool[] rowDone, bool[] columnDone, out int blamed)
+        int size, int[,] place, Complex[,] value, bool[] rowDone, bool[] columnDone, bool[] heldBack, double threshold, out int blamed)
     {
         blamed = -1;
         int[] rowCount = new int[size], columnCount = new int[size];
@@ -158,7 +178,7 @@ public sealed class LuPlan
         (int bestRow, int bestColumn, long bestCost, double bestWeight) = (-1, -1, long.MaxValue, 0);
         for (int j = 0; j < size; j++)
         {
-            if (columnDone[j])
+            if (columnDone[j] || heldBack[j])
             {
                 continue;
             }
@@ -180,8 +200,8 @@ public sealed class LuPlan
 
             for (int i = 0; i < size; i++)
             {
-                double weight = rowDone[i] || place[i, j] < 0 ? 0 : Complex.Abs(value[i, j]);
-                if (weight == 0 || weight < PivotThreshold * largest)
+                double weight = rowDone[i] || heldBack[i] || place[i, j] < 0 ? 0 : Complex.Abs(value[i, j]);
+                if (weight == 0 || weight < threshold * largest)
                 {
                     continue;
                 }

@@ -38,8 +38,7 @@ public static class ModeSolver
 
             w.CShape.CopyTo(w.NextShape, 0);
             w.CLeftShape.CopyTo(w.NextLeftShape, 0);
-            w.PencilLu.Solve(w.NextShape);
-            w.PencilLu.SolveTransposed(w.NextLeftShape);
+            w.PencilLu.SolveBoth(w.NextShape, w.NextLeftShape);
             if (!Workspace.Normalise(w.NextLeftShape, out _) || !Workspace.Normalise(w.NextShape, out Complex scale))
             {
                 return new ModeResult(s, tuningFarad, SolveStop.NotFinite, iteration, residual, 0);

@@ -42,6 +42,7 @@ public sealed class Network
         }
 
         CapacitiveEntries = builder.CapacitiveEntries();
+        LateUnknowns = [.. Devices.SelectMany(d => new[] { d.Control, d.Output, d.Common }).Where(u => u >= 0).Distinct().Order()];
         (PinnedAlways, PinnedDirect, PinnedDirectRemoved, PinnedRemoved) = builder.FindPins();
     }
 
@@ -82,6 +83,9 @@ public sealed class Network
 
     /// <summary>Entries that can hold a capacitance or inductance.</summary>
     internal int[] CapacitiveEntries { get; }
+
+    /// <summary>The unknowns devices are connected to: all others see only linear parts.</summary>
+    internal int[] LateUnknowns { get; }
 
     /// <summary>Diagonal entries of nodes that nothing joins to earth even at alternating current: a fault.</summary>
     internal int[] PinnedAlways { get; }

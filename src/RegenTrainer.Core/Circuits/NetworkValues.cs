@@ -286,7 +286,7 @@ public sealed class NetworkValues
     }
 
     /// <summary>Adds a two-port to the nine entries of its three terminals (its indefinite admittance matrix).</summary>
-    internal static void Add9(int[] entries, double[] values, double y11, double y12, double y21, double y22)
+    internal static void Add9(int[] entries, Span<double> values, double y11, double y12, double y21, double y22)
     {
         Add(values, entries[0], y11);
         Add(values, entries[1], y12);
@@ -299,7 +299,7 @@ public sealed class NetworkValues
         Add(values, entries[8], y11 + y12 + y21 + y22);
     }
 
-    private static void Add(double[] values, int entry, double value)
+    private static void Add(Span<double> values, int entry, double value)
     {
         if (entry >= 0)
         {

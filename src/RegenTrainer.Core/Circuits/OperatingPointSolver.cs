@@ -8,8 +8,8 @@ namespace RegenTrainer.Core.Circuits;
 /// </summary>
 public static class OperatingPointSolver
 {
-    /// <summary>A Newton step below this many volt leaves an error of the order of its square over the thermal voltage.</summary>
-    private const double VoltTolerance = 1e-9;
+    /// <summary>A Newton step below this many volt leaves an error of half its square over the thermal voltage: below 1e-12 V.</summary>
+    private const double VoltTolerance = 2e-7;
 
     private const int StepLimit = 200;
 
@@ -61,26 +61,34 @@ public static class OperatingPointSolver
             (w.Port1[d], w.Port2[d]) = Ports(network.Devices[d], w.Voltages);
         }
 
+        if (!TryHead(w, removed, supplyShare, out int blamed))
+        {
+            return new OperatingPoint(SolveStop.Singular, 0, double.NaN, blamed);
+        }
+
+        bool replanned = false;
         for (int iteration = 1; iteration <= stepLimit; iteration++)
         {
             Span<double> right = w.NextVoltages;
-            for (int i = 0; i < right.Length; i++)
-            {
-                right[i] = w.Values.DirectRight[i] * supplyShare;
-            }
-
-            Array.Copy(w.Values.Direct, w.DirectMatrix, w.DirectMatrix.Length);
+            Span<double> matrix = w.DirectLu.BeginTail(right);
             for (int d = 0; d < network.Devices.Count; d++)
             {
-                StampDevice(w, d, removed, right);
+                StampDevice(w, d, removed, matrix, right);
             }
 
-            if (!w.DirectLu.TryFactor(w.DirectMatrix, out int blamed))
+            if (!w.DirectLu.TryTail(right, out blamed))
             {
-                return new OperatingPoint(SolveStop.Singular, iteration, double.NaN, blamed);
+                // The pivots were chosen for other currents: choose once more for these, then believe it.
+                w.DirectLu.Forget();
+                if (replanned || !TryHead(w, removed, supplyShare, out blamed))
+                {
+                    return new OperatingPoint(SolveStop.Singular, iteration, double.NaN, blamed);
+                }
+
+                replanned = true;
+                continue;
             }
 
-            w.DirectLu.Solve(right);
             double largest = 0;
             for (int i = 0; i < right.Length; i++)
             {
@@ -112,6 +120,29 @@ public static class OperatingPointSolver
         }
 
         return new OperatingPoint(SolveStop.StepLimit, stepLimit, Residual(w, removed, supplyShare), -1);
+    }
+
+    /// <summary>Eliminates everything linear once; the devices come in step by step.</summary>
+    private static bool TryHead(Workspace w, bool removed, double supplyShare, out int blamed)
+    {
+        for (int i = 0; i < w.NextVoltages.Length; i++)
+        {
+            w.NextVoltages[i] = w.Values.DirectRight[i] * supplyShare;
+        }
+
+        if (w.DirectLu.HasPlan)
+        {
+            return w.DirectLu.TryHead(w.Values.Direct, w.Values.Direct, w.NextVoltages, out blamed);
+        }
+
+        w.Values.Direct.CopyTo(w.DirectSample, 0);
+        Span<double> unused = w.BiasScratch;
+        for (int d = 0; d < w.Network.Devices.Count; d++)
+        {
+            StampDevice(w, d, removed, w.DirectSample, unused);
+        }
+
+        return w.DirectLu.TryHead(w.Values.Direct, w.DirectSample, w.NextVoltages, out blamed);
     }
 
     private static OperatingPoint Finish(Workspace w, bool removed, double supplyShare, int iterations)
@@ -162,7 +193,7 @@ public static class OperatingPointSolver
         return largest;
     }
 
-    private static void StampDevice(Workspace w, int d, bool removed, Span<double> right)
+    private static void StampDevice(Workspace w, int d, bool removed, Span<double> matrix, Span<double> right)
     {
         DeviceStamp device = w.Network.Devices[d];
         if (removed && device.Regenerating)
@@ -171,7 +202,7 @@ public static class OperatingPointSolver
         }
 
         TwoPortPoint p = w.Values.Law(d).Evaluate(w.Port1[d], w.Port2[d]);
-        NetworkValues.Add9(device.Entries, w.DirectMatrix, p.G11, p.G12, p.G21, p.G22);
+        NetworkValues.Add9(device.Entries, matrix, p.G11, p.G12, p.G21, p.G22);
         double i1 = p.I1 - (p.G11 * w.Port1[d]) - (p.G12 * w.Port2[d]);
         double i2 = p.I2 - (p.G21 * w.Port1[d]) - (p.G22 * w.Port2[d]);
         Add(right, device.Control, -i1);

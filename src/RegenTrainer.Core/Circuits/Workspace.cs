@@ -14,9 +14,9 @@ public sealed class Workspace
         Network = network;
         Values = new NetworkValues(network);
         int n = network.Size, entries = network.Rows.Length, devices = network.Devices.Count;
-        DirectLu = new SparseLu<double>(n, network.Rows, network.Columns);
+        DirectLu = new HeadTailLu(n, network.Rows, network.Columns, network.LateUnknowns);
         PencilLu = new SparseLu<Complex>(n, network.Rows, network.Columns);
-        (DirectMatrix, PencilMatrix) = (new double[entries], new Complex[entries]);
+        (DirectSample, PencilMatrix, BiasScratch) = (new double[entries], new Complex[entries], new double[n]);
         (Voltages, NextVoltages) = (new double[n], new double[n]);
         (Shape, LeftShape, NextShape, NextLeftShape) = (new Complex[n], new Complex[n], new Complex[n], new Complex[n]);
         (CShape, CLeftShape, Right) = (new Complex[n], new Complex[n], new Complex[n]);
@@ -46,11 +46,13 @@ public sealed class Workspace
     /// <summary>Left vector of the last mode.</summary>
     public Complex[] LeftShape { get; }
 
-    internal SparseLu<double> DirectLu { get; }
+    internal HeadTailLu DirectLu { get; }
 
     internal SparseLu<Complex> PencilLu { get; }
 
-    internal double[] DirectMatrix { get; }
+    internal double[] DirectSample { get; }
+
+    internal double[] BiasScratch { get; }
 
     internal Complex[] PencilMatrix { get; }
 

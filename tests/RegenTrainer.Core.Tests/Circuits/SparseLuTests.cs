@@ -26,8 +26,10 @@ public sealed class SparseLuTests
             Complex[] x = [.. right], xt = [.. right];
             var lu = new SparseLu<Complex>(n, rows, columns);
             Assert.True(lu.TryFactor(entries, out _));
+            Complex[] again = [.. right];
             lu.Solve(x);
-            lu.SolveTransposed(xt);
+            lu.SolveBoth(again, xt);
+            Assert.Equal(x, again);
             AssertClose(dense.Solve(MathNet.Numerics.LinearAlgebra.Vector<Complex>.Build.DenseOfArray(right)).ToArray(), x, seed);
             AssertClose(dense.Transpose().Solve(MathNet.Numerics.LinearAlgebra.Vector<Complex>.Build.DenseOfArray(right)).ToArray(), xt, seed);
         }
@@ -88,20 +90,20 @@ public sealed class SparseLuTests
         var random = new CounterRandom(5);
         (int n, int[] rows, int[] columns) = Pattern(random);
         Complex[] entries = [.. rows.Select(_ => new Complex(random.NextSigned(), random.NextSigned()))];
-        Complex[] x = new Complex[n];
+        Complex[] x = new Complex[n], z = new Complex[n];
         var lu = new SparseLu<Complex>(n, rows, columns);
         for (int k = 0; k < 100; k++)
         {
             lu.TryFactor(entries, out _);
             x[0] = 1;
             lu.Solve(x);
-            lu.SolveTransposed(x);
+            lu.SolveBoth(x, z);
         }
 
         long before = GC.GetAllocatedBytesForCurrentThread();
         lu.TryFactor(entries, out _);
         lu.Solve(x);
-        lu.SolveTransposed(x);
+        lu.SolveBoth(x, z);
         Assert.Equal(0, GC.GetAllocatedBytesForCurrentThread() - before);
     }
 
