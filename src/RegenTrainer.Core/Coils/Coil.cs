@@ -76,6 +76,7 @@ public sealed class Coil : IWindingModel
         _wireSquareMetre = new double[SectionCount];
         MeasureWire();
         TotalHenry = SumOverFirst(_henry);
+        (FormLossQ, MeasuredQ) = (formLossQ, measured);
         _formLossPerOhm = formLossQ is { } loss ? 1.0 / Guard.InRange(loss, 1.0, 1e6, nameof(formLossQ)) : 0.0;
         _lossScale = 1.0;
         if (measured is { } found)
@@ -86,6 +87,12 @@ public sealed class Coil : IWindingModel
             _lossMeasured = true;
         }
     }
+
+    /// <summary>Q that the loss of form and insulation alone would leave; null for no such loss.</summary>
+    public double? FormLossQ { get; }
+
+    /// <summary>The measured Q that scales all losses, with its frequency in Hz; null for computed losses.</summary>
+    public (double Q, double AtHz)? MeasuredQ { get; }
 
     /// <inheritdoc/>
     public int SectionCount { get; }

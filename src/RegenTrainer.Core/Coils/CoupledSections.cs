@@ -32,6 +32,7 @@ public sealed class CoupledSections : IWindingModel
         }
 
         SectionCount = sections.Count;
+        (Sections, Couplings) = ([.. sections], [.. couplings ?? []]);
         _henry = InductanceMatrix(sections, couplings ?? []);
         CheckPositiveDefinite(nameof(couplings));
         _seriesOhm = [.. sections.Select(section => section.SeriesOhm)];
@@ -39,6 +40,12 @@ public sealed class CoupledSections : IWindingModel
         _spans = windings is null ? [new WindingSpan(0, SectionCount, 0.0, 0.0, 0)] : CheckedSpans(windings);
         _selfCapacitanceFarad = Array.ConvertAll(_spans, span => span.SelfCapacitanceFarad);
     }
+
+    /// <summary>The sections.</summary>
+    public IReadOnlyList<InductiveSection> Sections { get; }
+
+    /// <summary>The couplings stated; pairs not named are not coupled.</summary>
+    public IReadOnlyList<SectionCoupling> Couplings { get; }
 
     /// <inheritdoc/>
     public int SectionCount { get; }

@@ -1,0 +1,149 @@
+using RegenTrainer.Core.Circuits;
+using RegenTrainer.Core.Devices;
+using RegenTrainer.Core.Quantities;
+using RegenTrainer.Files.Devices;
+using RegenTrainer.Files.Toml;
+
+namespace RegenTrainer.Files.Stages;
+
+/// <summary>Reads one [[part]] table.</summary>
+internal static class PartTable
+{
+    public const int MostParts = 500;
+
+    /// <summary>The kinds of part this program knows.</summary>
+    public static readonly IReadOnlyList<string> Kinds =
+        ["resistor", "capacitor", "inductor", "bead", "windings", "bipolar", "supply", "antenna", "feedback"];
+
+    private const double Least = 1e-18;
+    private const double Most = 1e15;
+
+    /// <summary>The part, or null with its faults noted.</summary>
+    public static Part? Read(TableReader table, DeviceShelf shelf)
+    {
+        int before = table.Faults.Count;
+        string? kind = table.Choice("kind", Kinds, required: true);
+        string name = table.Text("name", required: kind is not null, "a name for the part") ?? "";
+        Part? part = null;
+        try
+        {
+            part = kind switch
+            {
+                "resistor" => Resistor(table, name),
+                "capacitor" => Capacitor(table, name),
+                "inductor" => Two(table, (a, b) => new Inductor(
+                    name, a, b, Value(table, "value", Unit.Henry), table.Quantity("resistance", Unit.Ohm, 0, Most, false) ?? 0,
+                    table.Quantity("q", Unit.None, 0.01, 1e9, false))),
+                "bead" => Two(table, (a, b) => new Bead(
+                    name, a, b, Value(table, "resistance", Unit.Ohm), Value(table, "inductance", Unit.Henry),
+                    table.Quantity("capacitance", Unit.Farad, 0, Most, false) ?? 0)),
+                "supply" => Two(table, (a, b) => new Supply(
+                    name, a, b, table.Quantity("voltage", Unit.Volt, -1000, 1000, true) ?? 0,
+                    table.Quantity("resistance", Unit.Ohm, 0, Most, false) ?? 0)),
+                "antenna" => Two(table, (a, b) => new Antenna(name, a, b)),
+                "bipolar" => Bipolar(table, name, shelf),
+                "feedback" => Feedback(table, name),
+                "windings" => WindingsTable.Read(table, name),
+                _ => null,
+            };
+        }
+        catch (ArgumentException e)
+        {
+            // A figure that is right alone and wrong with the others: the type that refuses it says why.
+            table.Refuse(table.Table.At, $"the part \"{name}\"", WithoutParameter(e.Message));
+        }
+
+        if (kind is null)
+        {
+            return null;
+        }
+
+        string? role = table.Choice("role", ["tuning", "regeneration", "regenerating"], required: false);
+        table.Finish();
+        if (table.Faults.Count > before || part is null)
+        {
+            return null;
+        }
+
+        return part with
+        {
+            Role = role switch
+            {
+                "tuning" => PartRole.Tuning,
+                "regeneration" => PartRole.Regeneration,
+                "regenerating" => PartRole.Regenerating,
+                _ => PartRole.None,
+            },
+        };
+    }
+
+    /// <summary>Two node names under a key.</summary>
+    public static (string From, string To)? Pair(TableReader table, string key)
+    {
+        IReadOnlyList<TomlValue> items = table.List(key, required: true, $"{key} = [\"one node\", \"another\"]");
+        if (items is [TomlText from, TomlText to])
+        {
+            return (from.Text, to.Text);
+        }
+
+        if (table.Table.Find(key) is { Value: TomlList list })
+        {
+            table.Refuse(list.At, $"{items.Count} entries", "two node names in quotes");
+        }
+
+        return null;
+    }
+
+    private static string WithoutParameter(string message)
+    {
+        int at = message.IndexOf(" (Parameter", StringComparison.Ordinal);
+        return at > 0 ? message[..at] : message;
+    }
+
+    private static double Value(TableReader table, string key, Unit unit) => table.Quantity(key, unit, Least, Most, true) ?? 1;
+
+    private static Part? Two(TableReader table, Func<string, string, Part> make) =>
+        Pair(table, "between") is { } nodes ? make(nodes.From, nodes.To) : null;
+
+    private static Part? Resistor(TableReader table, string name)
+    {
+        bool controlled = table.Table.Find("role")?.Value is TomlText { Text: "regeneration" };
+        double ohm = table.Quantity("value", Unit.Ohm, Least, Most, required: !controlled) ?? 1;
+        return Two(table, (a, b) => new Resistor(name, a, b, ohm));
+    }
+
+    private static Part? Capacitor(TableReader table, string name)
+    {
+        bool tuned = table.Table.Find("role")?.Value is TomlText { Text: "tuning" };
+        double farad = table.Quantity("value", Unit.Farad, Least, Most, required: !tuned) ?? 1e-12;
+        double? q = table.Quantity("q", Unit.None, 0.01, 1e9, required: false);
+        return Two(table, (a, b) => new Capacitor(name, a, b, farad, q));
+    }
+
+    private static Part? Bipolar(TableReader table, string name, DeviceShelf shelf)
+    {
+        TomlValue? device = table.Value("device", required: true, "the name of a device");
+        TableReader? nodes = table.Inner("nodes", required: true, "nodes = { base = \"..\", collector = \"..\", emitter = \"..\" }");
+        string? Node(string key) => nodes?.Text(key, required: true, $"the node of the {key}");
+        (string? basis, string? collector, string? emitter) = (Node("base"), Node("collector"), Node("emitter"));
+        nodes?.Finish();
+        if (device is not null and not TomlText)
+        {
+            table.Refuse(device.At, device.Phrase, "the name of a device in quotes");
+        }
+
+        return device is TomlText text && DeviceNames.TryFind(table, shelf, text, out BipolarModel? model)
+            && basis is not null && collector is not null && emitter is not null
+            ? new Bipolar(name, basis, collector, emitter, model!)
+            : null;
+    }
+
+    private static Part? Feedback(TableReader table, string name)
+    {
+        (string From, string To)? sense = Pair(table, "sense"), drive = Pair(table, "drive");
+        double siemens = table.Quantity("transconductance", Unit.Siemens, -1e3, 1e3, required: true) ?? 0;
+        bool controlled = table.Table.Find("role")?.Value is TomlText { Text: "regeneration" };
+        double factor = table.Quantity("factor", Unit.None, -1e6, 1e6, required: !controlled) ?? 1;
+        return sense is { } s && drive is { } d ? new Feedback(name, s.From, s.To, d.From, d.To, siemens, factor) : null;
+    }
+}

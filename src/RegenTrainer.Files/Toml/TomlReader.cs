@@ -1,0 +1,267 @@
+using Tomlyn.Parsing;
+using Tomlyn.Syntax;
+
+namespace RegenTrainer.Files.Toml;
+
+/// <summary>Reads TOML into tables whose every key and value knows its place, with the limits of our files.</summary>
+internal sealed class TomlReader
+{
+    /// <summary>Largest file in characters.</summary>
+    public const int MostCharacters = 1_000_000;
+
+    private const int MostLines = 20_000;
+    private const int DeepestNesting = 32;
+
+    private readonly string _file;
+    private readonly string _text;
+    private readonly List<FileFault> _faults;
+
+    private TomlReader(string file, string text, List<FileFault> faults) => (_file, _text, _faults) = (file, text, faults);
+
+    /// <summary>Reads a text; null where it is no TOML or beyond a limit, with the reason added to the faults.</summary>
+    public static TomlTable? TryRead(string file, string text, List<FileFault> faults)
+    {
+        var reader = new TomlReader(file, text, faults);
+        return reader.WithinLimits() ? reader.Read() : null;
+    }
+
+    /// <summary>Checks size, lines and nesting on the bare characters, before anything is built of them.</summary>
+    private bool WithinLimits()
+    {
+        if (_text.Length > MostCharacters)
+        {
+            return Refuse(TomlPlace.Start, $"a file of {_text.Length} characters", "at most 1 MB");
+        }
+
+        (int line, int column, int depth) = (1, 1, 0);
+        char quote = '\0';
+        bool comment = false;
+        foreach (char c in _text)
+        {
+            if (c == '\n')
+            {
+                (line, column, comment, quote) = (line + 1, 1, false, '\0');
+                if (line > MostLines)
+                {
+                    return Refuse(new TomlPlace(line, 1), $"more than {MostLines} lines", $"at most {MostLines} lines");
+                }
+
+                continue;
+            }
+
+            if (quote != '\0')
+            {
+                quote = c == quote ? '\0' : quote;
+            }
+            else if (!comment)
+            {
+                switch (c)
+                {
+                    case '#':
+                        comment = true;
+                        break;
+                    case '"' or '\'':
+                        quote = c;
+                        break;
+                    case '[' or '{':
+                        if (++depth > DeepestNesting)
+                        {
+                            return Refuse(new TomlPlace(line, column), $"brackets nested {depth} deep", $"at most {DeepestNesting}");
+                        }
+
+                        break;
+                    case ']' or '}':
+                        depth = Math.Max(0, depth - 1);
+                        break;
+                    default:
+                        break;
+                }
+            }
+
+            column++;
+        }
+
+        return true;
+    }
+
+    private bool Refuse(TomlPlace at, string found, string expected)
+    {
+        _faults.Add(new FileFault(_file, at.Line, at.Column, found, expected));
+        return false;
+    }
+
+    private TomlTable? Read()
+    {
+        DocumentSyntax document = SyntaxParser.Parse(_text, _file);
+        if (document.HasErrors)
+        {
+            DiagnosticMessage first = document.Diagnostics.First(d => d.Kind == DiagnosticMessageKind.Error);
+            TomlPlace at = Place(first.Span);
+            Refuse(at, Offending(first.Span), "TOML: key = value, [table] or # comment, texts closed on their line");
+            return null;
+        }
+
+        var root = new TomlTable(TomlPlace.Start, default);
+        Fill(root, document.KeyValues, 0);
+        foreach (TableSyntaxBase table in document.Tables)
+        {
+            if (table.Name is not { } name || Open(root, name, table is TableArraySyntax) is not { } target)
+            {
+                continue;
+            }
+
+            Fill(target, table.Items, 0);
+        }
+
+        return root;
+    }
+
+    private string Offending(SourceSpan span)
+    {
+        int offset = span.Start.Offset;
+        if (offset >= _text.Length)
+        {
+            return "the end of the file";
+        }
+
+        char c = _text[offset];
+        return c is '\n' or '\r' ? "the end of the line" : $"'{c}'";
+    }
+
+    private TomlTable? Open(TomlTable root, KeySyntax name, bool repeated)
+    {
+        List<(string Key, TomlPlace At)> path = Path(name);
+        if (path.Count > DeepestNesting)
+        {
+            Refuse(path[0].At, $"a name of {path.Count} pieces", $"at most {DeepestNesting}");
+            return null;
+        }
+
+        TomlTable table = root;
+        for (int k = 0; k < path.Count; k++)
+        {
+            (string key, TomlPlace at) = path[k];
+            bool last = k == path.Count - 1;
+            TomlEntry? entry = table.Find(key);
+            if (entry is null)
+            {
+                var made = new TomlTable(at, Span(name.Span)) { IsImplied = !last };
+                TomlValue value = last && repeated ? new TomlTables(at, Span(name.Span), [made]) : made;
+                table.TryAdd(new TomlEntry(key, at, value, Span(name.Span)));
+                table = made;
+            }
+            else if (entry.Value is TomlTables tables)
+            {
+                if (last && repeated)
+                {
+                    tables.Tables.Add(new TomlTable(at, Span(name.Span)));
+                }
+
+                table = tables.Tables[^1];
+            }
+            else if (entry.Value is TomlTable { IsInline: false } there && (!last || (there.IsImplied && !repeated)))
+            {
+                there.IsImplied = there.IsImplied && !last;
+                table = there;
+            }
+            else
+            {
+                Refuse(at, $"\"{key}\" a second time", "each table and key once");
+                return null;
+            }
+        }
+
+        return table;
+    }
+
+    private void Fill(TomlTable table, IEnumerable<KeyValueSyntax> items, int depth)
+    {
+        foreach (KeyValueSyntax item in items)
+        {
+            if (item.Key is not { } key || item.Value is not { } value)
+            {
+                continue;
+            }
+
+            List<(string Key, TomlPlace At)> path = Path(key);
+            if (path.Count + depth > DeepestNesting)
+            {
+                Refuse(path[0].At, $"a key of {path.Count} pieces", $"at most {DeepestNesting}");
+                continue;
+            }
+
+            TomlTable target = table;
+            for (int k = 0; k < path.Count - 1; k++)
+            {
+                if (target.Find(path[k].Key) is not { } entry)
+                {
+                    var made = new TomlTable(path[k].At, Span(key.Span)) { IsImplied = true };
+                    target.TryAdd(new TomlEntry(path[k].Key, path[k].At, made, Span(item.Span)));
+                    target = made;
+                }
+                else if (entry.Value is TomlTable there)
+                {
+                    target = there;
+                }
+                else
+                {
+                    Refuse(path[k].At, $"\"{path[k].Key}\" a second time", "each table and key once");
+                    return;
+                }
+            }
+
+            var line = new TomlSpan(key.Span.Start.Offset, value.Span.End.Offset + 1 - key.Span.Start.Offset);
+            if (!target.TryAdd(new TomlEntry(path[^1].Key, path[^1].At, Value(value, depth + 1), line)))
+            {
+                Refuse(path[^1].At, $"\"{path[^1].Key}\" a second time", "each table and key once");
+            }
+        }
+    }
+
+    private TomlValue Value(ValueSyntax value, int depth)
+    {
+        (TomlPlace at, TomlSpan span) = (Place(value.Span), Span(value.Span));
+        switch (value)
+        {
+            case StringValueSyntax s:
+                string text = s.Value ?? "";
+                return new TomlText(at, span, text, string.CompareOrdinal(_text, span.Offset + 1, text, 0, text.Length) == 0);
+            case IntegerValueSyntax i:
+                return new TomlNumber(at, span, i.Value, true, Written(span));
+            case FloatValueSyntax f when double.IsFinite(f.Value):
+                return new TomlNumber(at, span, f.Value, false, Written(span));
+            case ArraySyntax a:
+                return new TomlList(at, span, [.. a.Items.Where(i => i.Value is not null).Select(i => Value(i.Value!, depth + 1))]);
+            case InlineTableSyntax t:
+                var table = new TomlTable(at, span) { IsInline = true };
+                Fill(table, t.Items.Where(i => i.KeyValue is not null).Select(i => i.KeyValue!), depth + 1);
+                return table;
+            default:
+                return new TomlOther(at, span, Written(span));
+        }
+    }
+
+    private static List<(string Key, TomlPlace At)> Path(KeySyntax key)
+    {
+        List<(string, TomlPlace)> path = [(Name(key.Key), Place(key.Key!.Span))];
+        foreach (DottedKeyItemSyntax dotted in key.DotKeys)
+        {
+            path.Add((Name(dotted.Key), Place(dotted.Key!.Span)));
+        }
+
+        return path;
+    }
+
+    private static string Name(BareKeyOrStringValueSyntax? key) => key switch
+    {
+        StringValueSyntax s => s.Value ?? "",
+        BareKeySyntax b => b.Key?.Text ?? "",
+        _ => "",
+    };
+
+    private string Written(TomlSpan span) => _text.Substring(span.Offset, Math.Min(span.Length, 40));
+
+    private static TomlPlace Place(SourceSpan span) => new(span.Start.Line + 1, span.Start.Column + 1);
+
+    private static TomlSpan Span(SourceSpan span) => new(span.Start.Offset, span.End.Offset + 1 - span.Start.Offset);
+}

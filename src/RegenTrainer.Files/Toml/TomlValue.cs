@@ -1,0 +1,82 @@
+namespace RegenTrainer.Files.Toml;
+
+/// <summary>A value with its place.</summary>
+internal abstract record TomlValue(TomlPlace At, TomlSpan Span)
+{
+    /// <summary>The kind of value, as a phrase for a message.</summary>
+    public abstract string Phrase { get; }
+}
+
+/// <summary>A string. <paramref name="Verbatim"/> says that no escapes shift its characters against the text.</summary>
+internal sealed record TomlText(TomlPlace At, TomlSpan Span, string Text, bool Verbatim) : TomlValue(At, Span)
+{
+    private const int LongestQuote = 40;
+
+    public override string Phrase => Text.Length == 0 ? "an empty text"
+        : Text.Length <= LongestQuote ? $"\"{Text}\"" : $"\"{Text[..LongestQuote]}...\"";
+
+    /// <summary>The place of a character of the string.</summary>
+    public TomlPlace PlaceOf(int offset) => Verbatim ? At with { Column = At.Column + 1 + offset } : At;
+}
+
+/// <summary>A number.</summary>
+internal sealed record TomlNumber(TomlPlace At, TomlSpan Span, double Number, bool IsWhole, string Written) : TomlValue(At, Span)
+{
+    public override string Phrase => Written;
+}
+
+/// <summary>True, false, a date: nothing a stage has a use for.</summary>
+internal sealed record TomlOther(TomlPlace At, TomlSpan Span, string Written) : TomlValue(At, Span)
+{
+    public override string Phrase => Written;
+}
+
+/// <summary>A list of values.</summary>
+internal sealed record TomlList(TomlPlace At, TomlSpan Span, IReadOnlyList<TomlValue> Items) : TomlValue(At, Span)
+{
+    public override string Phrase => "a list";
+}
+
+/// <summary>A table, inline or under a header.</summary>
+internal sealed record TomlTable(TomlPlace At, TomlSpan Span) : TomlValue(At, Span)
+{
+    private readonly Dictionary<string, TomlEntry> _byKey = new(StringComparer.Ordinal);
+
+    /// <summary>The entries in order.</summary>
+    public List<TomlEntry> Entries { get; } = [];
+
+    /// <summary>Whether it is written in braces on one line.</summary>
+    public bool IsInline { get; init; }
+
+    /// <summary>Whether it came about by dots in a key or header only.</summary>
+    public bool IsImplied { get; set; }
+
+    public override string Phrase => "a table";
+
+    public TomlEntry? Find(string key) => _byKey.GetValueOrDefault(key);
+
+    /// <summary>Adds an entry; false where the key is there already.</summary>
+    public bool TryAdd(TomlEntry entry)
+    {
+        if (!_byKey.TryAdd(entry.Key, entry))
+        {
+            return false;
+        }
+
+        Entries.Add(entry);
+        return true;
+    }
+}
+
+/// <summary>The tables of one name under double-bracketed headers.</summary>
+internal sealed record TomlTables(TomlPlace At, TomlSpan Span, List<TomlTable> Tables) : TomlValue(At, Span)
+{
+    public override string Phrase => "tables under [[ ]]";
+}
+
+/// <summary>A key with its value.</summary>
+/// <param name="Key">The key, one piece without dots.</param>
+/// <param name="KeyAt">Where the key stands.</param>
+/// <param name="Value">The value.</param>
+/// <param name="Line">The span of the whole entry, key to value.</param>
+internal sealed record TomlEntry(string Key, TomlPlace KeyAt, TomlValue Value, TomlSpan Line);
