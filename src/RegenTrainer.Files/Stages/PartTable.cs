@@ -50,7 +50,7 @@ internal static class PartTable
         catch (ArgumentException e)
         {
             // A figure that is right alone and wrong with the others: the type that refuses it says why.
-            table.Refuse(table.Table.At, $"the part \"{name}\"", WithoutParameter(e.Message));
+            table.Refuse(table.Table.At, $"the part \"{name}\": {WithoutParameter(e.Message)}", "figures that can be built");
         }
 
         if (kind is null)
@@ -88,7 +88,7 @@ internal static class PartTable
 
         if (table.Table.Find(key) is { Value: TomlList list })
         {
-            table.Refuse(list.At, $"{items.Count} entries", "two node names in quotes");
+            table.Refuse(list.At, items.Count == 1 ? "one entry" : $"{items.Count} entries", "two node names in quotes");
         }
 
         return null;

@@ -33,52 +33,23 @@ internal sealed class TomlReader
             return Refuse(TomlPlace.Start, $"a file of {_text.Length} characters", "at most 1 MB");
         }
 
-        (int line, int column, int depth) = (1, 1, 0);
-        char quote = '\0';
-        bool comment = false;
-        foreach (char c in _text)
+        var scan = new BracketScan(_text);
+        while (scan.MoveNext())
         {
-            if (c == '\n')
+            if (scan.Line > MostLines)
             {
-                (line, column, comment, quote) = (line + 1, 1, false, '\0');
-                if (line > MostLines)
-                {
-                    return Refuse(new TomlPlace(line, 1), $"more than {MostLines} lines", $"at most {MostLines} lines");
-                }
-
-                continue;
+                return Refuse(new TomlPlace(scan.Line, 1), $"more than {MostLines} lines", $"at most {MostLines} lines");
             }
 
-            if (quote != '\0')
+            if (scan.Depth > DeepestNesting)
             {
-                quote = c == quote ? '\0' : quote;
-            }
-            else if (!comment)
-            {
-                switch (c)
-                {
-                    case '#':
-                        comment = true;
-                        break;
-                    case '"' or '\'':
-                        quote = c;
-                        break;
-                    case '[' or '{':
-                        if (++depth > DeepestNesting)
-                        {
-                            return Refuse(new TomlPlace(line, column), $"brackets nested {depth} deep", $"at most {DeepestNesting}");
-                        }
-
-                        break;
-                    case ']' or '}':
-                        depth = Math.Max(0, depth - 1);
-                        break;
-                    default:
-                        break;
-                }
+                return Refuse(scan.At, $"brackets nested {scan.Depth} deep", $"at most {DeepestNesting}");
             }
 
-            column++;
+            if (scan.Unclosed is { } quote)
+            {
+                return Refuse(quote, "a text that does not end on its line", "a closing quote");
+            }
         }
 
         return true;
@@ -97,7 +68,11 @@ internal sealed class TomlReader
         {
             DiagnosticMessage first = document.Diagnostics.First(d => d.Kind == DiagnosticMessageKind.Error);
             TomlPlace at = Place(first.Span);
-            Refuse(at, Offending(first.Span), "TOML: key = value, [table] or # comment, texts closed on their line");
+            bool twice = first.Message.Contains("already", StringComparison.Ordinal);
+            Refuse(
+                at,
+                twice ? "a key or table a second time" : Offending(first.Span),
+                twice ? "each key and table once" : "key = value, [table] or # comment");
             return null;
         }
 
