@@ -1,1 +1,3 @@
-return 0;
+using RegenTrainer.Commands;
+
+return EntryPoint.Run(args);

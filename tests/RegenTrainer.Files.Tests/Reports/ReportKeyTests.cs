@@ -76,6 +76,10 @@ public sealed class ReportKeyTests
             "name turns inductance_henry q resistance_ohm self_capacitance_farad wire_length_metre",
             Keys(coil.GetProperty("windings")[0]));
 
+        JsonElement check = Parse(CheckJson.Write(null, [new FileFault("a.toml", 3, 7, "x", "y")]));
+        Assert.Equal(Head + "faults", Keys(check));
+        Assert.Equal("file line column found expected", Keys(check.GetProperty("faults")[0]));
+
         JsonElement presets = Parse(PresetsJson.Write([new PresetEntry("tapped-coil-npn", "Tern Point", "tapped-coil")]));
         Assert.Equal(Head + "presets", Keys(presets));
         Assert.Equal("name title circuit", Keys(presets.GetProperty("presets")[0]));
