@@ -8,7 +8,7 @@ public sealed record LinearControl : IControlLaw
     /// <summary>States an even control.</summary>
     /// <param name="minimum">Value at travel 0.</param>
     /// <param name="maximum">Value at travel 100 %, another than <paramref name="minimum"/>.</param>
-    /// <param name="mechanicalDegrees">Angle from stop to stop in degrees, above 0 to 3600.</param>
+    /// <param name="mechanicalDegrees">Angle from stop to stop in degrees, 1 to 3600.</param>
     /// <exception cref="ArgumentOutOfRangeException">A value is not finite, both are equal, or the angle is outside its range.</exception>
     public LinearControl(double minimum, double maximum, double mechanicalDegrees = 300)
     {
@@ -34,16 +34,29 @@ public sealed record LinearControl : IControlLaw
     public IReadOnlyList<double> KinkTravels => [];
 
     /// <inheritdoc/>
-    public double ValueAt(double travelPercent) =>
-        ValueAtStart + ((ValueAtEnd - ValueAtStart) * Guard.InRange(travelPercent, 0, 100, nameof(travelPercent)) / 100);
+    public double ValueAt(double travelPercent)
+    {
+        double value = ValueAtStart + ((ValueAtEnd - ValueAtStart) * Guard.InRange(travelPercent, 0, 100, nameof(travelPercent)) / 100);
+
+        // Rounding must not carry the value past its end, where it would have no travel.
+        return Math.Clamp(value, Least, Largest);
+    }
 
     /// <inheritdoc/>
     public double? TravelAt(double value)
     {
-        double travel = 100 * (value - ValueAtStart) / (ValueAtEnd - ValueAtStart);
-        return travel is >= 0 and <= 100 ? travel : null;
+        if (!(value >= Least && value <= Largest))
+        {
+            return null;
+        }
+
+        return Math.Clamp(100 * (value - ValueAtStart) / (ValueAtEnd - ValueAtStart), 0, 100);
     }
 
     /// <inheritdoc/>
     public double DegreesAt(double travelPercent) => MechanicalDegrees * travelPercent / 100;
+
+    private double Least => Math.Min(ValueAtStart, ValueAtEnd);
+
+    private double Largest => Math.Max(ValueAtStart, ValueAtEnd);
 }

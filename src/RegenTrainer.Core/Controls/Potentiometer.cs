@@ -111,7 +111,9 @@ public sealed record Potentiometer : IControlLaw
 
         ((double x0, double y0), (double x1, double y1)) = (_track[piece - 1], _track[piece]);
         double fraction = y0 + ((y1 - y0) * (rotation - x0) / (x1 - x0));
-        return WithShunt(EndOhm + ((TotalOhm - EndOhm) * (1 - fraction)));
+
+        // Rounding must not carry the value past its ends, where it would have no travel.
+        return Math.Clamp(WithShunt(EndOhm + ((TotalOhm - EndOhm) * (1 - fraction))), ValueAtEnd, ValueAtStart);
     }
 
     /// <inheritdoc/>
@@ -147,7 +149,7 @@ public sealed record Potentiometer : IControlLaw
     public override int GetHashCode() => HashCode.Combine(TotalOhm, Taper, MidPercent, EndOhm, MechanicalDegrees, ElectricalDegrees, ShuntOhm);
 
     private double TravelOf(double rotation) =>
-        100 * (((MechanicalDegrees - ElectricalDegrees) / 2) + (rotation * ElectricalDegrees)) / MechanicalDegrees;
+        Math.Min(100, 100 * (((MechanicalDegrees - ElectricalDegrees) / 2) + (rotation * ElectricalDegrees)) / MechanicalDegrees);
 
     private double WithShunt(double ohm) => ShuntOhm is { } shunt ? ohm * shunt / (ohm + shunt) : ohm;
 
@@ -162,7 +164,7 @@ public sealed record Potentiometer : IControlLaw
         {
             if (!(table[k].RotationPercent > table[k - 1].RotationPercent && table[k].FractionPercent > table[k - 1].FractionPercent))
             {
-                throw new ArgumentException("a measured track rises in both columns", nameof(table));
+                throw new ArgumentException($"a measured track rises in both columns; point {k + 1} does not rise above the one before", nameof(table));
             }
         }
 

@@ -29,7 +29,7 @@ public sealed record VariableCapacitor
     /// <param name="law">How the capacitance goes with the angle.</param>
     /// <param name="q">One over its loss tangent, above 0; null for none.</param>
     /// <param name="table">Of a measured capacitor: degrees and farad, both rising, from 0 degrees and the least to the largest capacitance.</param>
-    /// <param name="rotationDegrees">Angle from stop to stop in degrees, 1 to 3600.</param>
+    /// <param name="rotationDegrees">Angle from stop to stop in degrees, 1 to 3600; of a measured capacitor its last point states it.</param>
     /// <exception cref="ArgumentOutOfRangeException">A value is outside its range.</exception>
     /// <exception cref="ArgumentException">The table does not rise between the stated ends.</exception>
     public VariableCapacitor(
@@ -45,7 +45,7 @@ public sealed record VariableCapacitor
         Law = law;
         Q = q is { } value ? Guard.Positive(value, nameof(q)) : null;
         _table = law == CapacitorLaw.Table ? Measured(table, minimumFarad, maximumFarad) : [];
-        RotationDegrees = law == CapacitorLaw.Table ? _table[^1].Degrees : Guard.InRange(rotationDegrees, 1, 3600, nameof(rotationDegrees));
+        RotationDegrees = Guard.InRange(law == CapacitorLaw.Table ? _table[^1].Degrees : rotationDegrees, 1, 3600, nameof(rotationDegrees));
     }
 
     /// <summary>Capacitance at the open stop in farad.</summary>
@@ -73,11 +73,13 @@ public sealed record VariableCapacitor
         {
             int piece = Piece(p => p.Degrees < degrees);
             ((double d0, double c0), (double d1, double c1)) = (_table[piece - 1], _table[piece]);
-            return c0 + ((c1 - c0) * (degrees - d0) / (d1 - d0));
+            return Math.Clamp(c0 + ((c1 - c0) * (degrees - d0) / (d1 - d0)), c0, c1);
         }
 
         double start = Straight(MinimumFarad), end = Straight(MaximumFarad);
-        return FromStraight(start + ((end - start) * degrees / RotationDegrees));
+
+        // Rounding must not carry the value past its ends, where it would have no angle.
+        return Math.Clamp(FromStraight(start + ((end - start) * degrees / RotationDegrees)), MinimumFarad, MaximumFarad);
     }
 
     /// <summary>The angle in degrees at which the capacitor has a value; null out of its reach.</summary>
@@ -92,11 +94,11 @@ public sealed record VariableCapacitor
         {
             int piece = Piece(p => p.Farad < farad);
             ((double d0, double c0), (double d1, double c1)) = (_table[piece - 1], _table[piece]);
-            return d0 + ((d1 - d0) * (farad - c0) / (c1 - c0));
+            return Math.Clamp(d0 + ((d1 - d0) * (farad - c0) / (c1 - c0)), d0, d1);
         }
 
         double start = Straight(MinimumFarad), end = Straight(MaximumFarad);
-        return RotationDegrees * (Straight(farad) - start) / (end - start);
+        return Math.Clamp(RotationDegrees * (Straight(farad) - start) / (end - start), 0, RotationDegrees);
     }
 
     /// <summary>Slope in farad per degree at an angle; at a measured point that of the piece below it.</summary>
@@ -164,7 +166,7 @@ public sealed record VariableCapacitor
         {
             if (!(table[k].Degrees > table[k - 1].Degrees && table[k].Farad > table[k - 1].Farad))
             {
-                throw new ArgumentException("a measured capacitor rises in both columns", nameof(table));
+                throw new ArgumentException($"a measured capacitor rises in both columns; point {k + 1} does not rise above the one before", nameof(table));
             }
         }
 

@@ -30,8 +30,8 @@ public sealed class BipolarLaw : IDeviceLaw
     /// <summary>The transport factor 1 - v_bc/V_A is held above this where a large forward collector junction would turn it over.</summary>
     private const double SmallestEarlyFactor = 0.05;
 
-    /// <summary>Collector-emitter voltage in volt at which data sheets state the transition frequency: common practice.</summary>
-    private const double TransitionVolt = 5;
+    /// <summary>Collector-emitter voltage in volt at which data sheets state gain and transition frequency: common practice.</summary>
+    private const double DataSheetVolt = 5;
 
     private readonly double _sign;
     private readonly double _thermalVolt;
@@ -60,29 +60,21 @@ public sealed class BipolarLaw : IDeviceLaw
         double rise = Math.Pow(now / cold, SaturationPower) * Math.Exp(BandGapVolt * ((1 / coldThermal) - (1 / _thermalVolt)));
         double gainRise = Math.Pow(now / cold, GainPower);
         _saturation = coldSaturation * rise;
-
-        // 1/gain = 1/ideal + K/sqrt(collector current): two points give both, exactly.
-        double gain = model.CurrentGain.RisingWith(grade), gainAt = model.CurrentGain.At ?? 1e-3;
-        double slope = 0;
-        if (model.CurrentGainLow is { At: { } lowAt } low && lowAt < gainAt)
-        {
-            double lowGain = low.Typical * gain / model.CurrentGain.Typical;
-            slope = Math.Max(0, ((1 / lowGain) - (1 / gain)) / ((1 / Math.Sqrt(lowAt)) - (1 / Math.Sqrt(gainAt))));
-        }
-
-        _inverseGain = ((1 / gain) - (slope / Math.Sqrt(gainAt))) / gainRise;
-        _recombination = slope * Math.Sqrt(coldSaturation) * Math.Sqrt(rise) / gainRise;
         _earlyVolt = model.EarlyVoltage.Typical;
+        (_inverseGain, _recombination) = BaseCurrents(model, grade, coldSaturation);
+        _inverseGain /= gainRise;
+        _recombination *= Math.Sqrt(rise) / gainRise;
         _emitterJunction = JunctionCapacitance.FromReverse(model.InputCapacitance.FallingWith(grade), model.InputCapacitance.At ?? 0.5);
         _collectorJunction = JunctionCapacitance.FromReverse(model.OutputCapacitance.FallingWith(grade), model.OutputCapacitance.At ?? 5);
 
-        // tau = 1/(2 pi f_T) - (C_je + C_jc) V_T/I at the current the transition frequency is stated for.
+        // tau = 1/(2 pi f_T) - (C_je + C_jc) V_T/I at the current the transition frequency is stated for; only the part of that
+        // current that is not Early's has its charge in the base.
         double transition = model.TransitionFrequency.RisingWith(grade), transitionAt = model.TransitionFrequency.At ?? 1e-2;
-        double baseVolt = coldThermal * Math.Log(transitionAt / coldSaturation);
-        double junctions = _emitterJunction.At(baseVolt).Farad + _collectorJunction.At(baseVolt - TransitionVolt).Farad;
+        (double baseVolt, double early) = SheetPoint(transitionAt, coldSaturation);
+        double junctions = _emitterJunction.At(baseVolt).Farad + _collectorJunction.At(baseVolt - DataSheetVolt).Farad;
         double transit = (1 / (2 * Math.PI * transition)) - (junctions * coldThermal / transitionAt);
         IsTransitTimeClamped = transit < 0;
-        _transitSeconds = Math.Max(0, transit);
+        _transitSeconds = Math.Max(0, transit) * early;
         _criticalVolt = _thermalVolt * Math.Log(_thermalVolt / (Math.Sqrt(2) * _saturation));
     }
 
@@ -143,6 +135,46 @@ public sealed class BipolarLaw : IDeviceLaw
 
         (v1New, v2New) = (_sign * emitter, _sign * (emitter - collector));
         return true;
+    }
+
+    /// <summary>Base voltage and Early's factor at the voltage of data sheets, their temperature and a collector current.</summary>
+    private (double BaseVolt, double Early) SheetPoint(double collectorAmpere, double saturation)
+    {
+        double thermal = PhysicalConstants.ThermalVoltage(DataSheetCelsius), volt = 0, early = 1;
+
+        // The factor hangs on the base voltage by less than a hundredth part of it, so that each round adds two digits or more.
+        for (int round = 0; round < 10; round++)
+        {
+            volt = thermal * Math.Log(collectorAmpere / (saturation * early));
+            early = Math.Max(1 + ((DataSheetVolt - volt) / _earlyVolt), SmallestEarlyFactor);
+        }
+
+        return (volt, early);
+    }
+
+    /// <summary>
+    /// One over the ideal gain, and the recombination current in ampere at the temperature of data sheets: the two stated gains
+    /// give both, exactly. A gain that falls faster than the root of the current is met at its higher current alone.
+    /// </summary>
+    private (double InverseGain, double Recombination) BaseCurrents(BipolarModel model, Grade grade, double saturation)
+    {
+        double gain = model.CurrentGain.RisingWith(grade), gainAt = model.CurrentGain.At ?? 1e-3;
+        (double forward, double half, double demand) = Point(gain, gainAt);
+        double recombination = 0;
+        if (model.CurrentGainLow is { At: { } lowAt } low && lowAt < gainAt)
+        {
+            (double lowForward, double lowHalf, double lowDemand) = Point(low.Typical * gain / model.CurrentGain.Typical, lowAt);
+            recombination = ((lowDemand * forward) - (demand * lowForward)) / ((lowHalf * forward) - (half * lowForward));
+            recombination = Math.Max(0, Math.Min(recombination, demand / half));
+        }
+
+        return ((demand - (recombination * half)) / forward, recombination);
+
+        (double Forward, double Half, double Demand) Point(double ratio, double ampere)
+        {
+            double volt = SheetPoint(ampere, saturation).BaseVolt, thermal = PhysicalConstants.ThermalVoltage(DataSheetCelsius);
+            return (saturation * (Math.Exp(volt / thermal) - 1), Math.Exp(0.5 * volt / thermal) - 1, ampere / ratio);
+        }
     }
 
     private static double Exponential(double x, out double slope)
