@@ -3,9 +3,12 @@ namespace RegenTrainer.Files.Tests;
 /// <summary>Texts that are compared with a file in the source tree; UPDATE_GOLDEN=1 writes them anew, a missing one fails.</summary>
 internal static class Golden
 {
-    public static void Check(string actual, string name)
+    public static void Check(string actual, string name) => CheckAt(actual, "tests", "RegenTrainer.Files.Tests", "Golden", name);
+
+    /// <summary>Compares with a file of the documentation or elsewhere in the source tree.</summary>
+    public static void CheckAt(string actual, params string[] place)
     {
-        string path = Path.Combine(Root(), "tests", "RegenTrainer.Files.Tests", "Golden", name);
+        (string path, string name) = (Path.Combine([Root(), .. place]), place[^1]);
         actual = actual.ReplaceLineEndings("\n").TrimEnd('\n') + "\n";
         if (Environment.GetEnvironmentVariable("UPDATE_GOLDEN") == "1")
         {
