@@ -89,6 +89,7 @@ internal static class ReadingFigures
             cautions.Add(new Caution("no-bandwidth", "the response does not fall by 3 dB on both sides of its peak"));
         }
 
+        double?[] down = sidebands.AudioDownHz([3, 6, 10]);
         return reading with
         {
             StageGainDb = Decibel.FromRatio(Complex.Abs(sidebands.Carrier)),
@@ -96,7 +97,7 @@ internal static class ReadingFigures
             BandwidthHz = bandwidth,
             BandwidthDialDegrees = bandwidth is { } b ? DialDegrees(ws, mode, b) : null,
             Sidebands = [.. audioHz.Where(hz => hz < reading.Setting.StationHz).Select(sidebands.At)],
-            AudioDownHz = (sidebands.AudioDownHz(3), sidebands.AudioDownHz(6), sidebands.AudioDownHz(10)),
+            AudioDownHz = (down[0], down[1], down[2]),
             SpeechIndex = SpeechIndex.Of(hz => sidebands.At(hz).AudioDb),
         };
     }

@@ -13,7 +13,7 @@ public static class DeviceMargin
     /// <summary>A factor beyond this (40 dB) is no device any more.</summary>
     private const double LargestFactor = 100;
 
-    private const double ScanRatio = 1.25;
+    private const double ScanRatio = 1.5;
 
     private const int RefineLimit = 50;
 

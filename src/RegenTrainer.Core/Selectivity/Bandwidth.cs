@@ -7,8 +7,8 @@ public static class Bandwidth
 {
     private const double GoldenRatio = 0.381966011250105;
 
-    /// <summary>The peak is bracketed to this fraction of the tank's half bandwidth; its level is then exact to rounding.</summary>
-    private const double PeakTolerance = 1e-7;
+    /// <summary>The peak is bracketed to this fraction of the tank's half bandwidth; its level is then exact to the square of it.</summary>
+    private const double PeakTolerance = 3e-6;
 
     private const double EdgeTolerance = 1e-12;
 

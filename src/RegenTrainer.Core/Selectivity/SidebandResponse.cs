@@ -40,18 +40,26 @@ public readonly record struct SidebandResponse
             Decibel.FromRatio(Complex.Abs(upper + Complex.Conjugate(lower)) / 2));
     }
 
-    /// <summary>The second harmonic that unlike sidebands make in an ideal envelope detector, relative to the fundamental; 0 on tune.</summary>
+    /// <summary>The second harmonic in the output of an ideal envelope detector, relative to the fundamental; next to nothing on tune.</summary>
     /// <param name="audioHz">Audio frequency in Hz.</param>
     /// <param name="depth">Depth of modulation, 0 to 1.</param>
+    /// <returns>The ratio, by a Fourier sum over the envelope of carrier and both sidebands; 0 where there is no fundamental.</returns>
     public double SecondHarmonic(double audioHz, double depth)
     {
-        // Of 1 + a e^jx + b e^-jx the part in quadrature with the carrier, of amplitude |a - conj b|, lengthens the phasor by
-        // half its square, which is a constant and a second harmonic of |a - conj b|^2/4.
+        const int points = 64;
         Complex upper = depth / 2 * _transfer.At(StationHz + audioHz) / Carrier;
         Complex lower = depth / 2 * _transfer.At(StationHz - audioHz) / Carrier;
-        Complex inPhase = upper + Complex.Conjugate(lower), quadrature = upper - Complex.Conjugate(lower);
-        double fundamental = Complex.Abs(inPhase);
-        return fundamental > 0 ? Complex.Abs(quadrature * quadrature) / 4 / fundamental : 0;
+        (Complex first, Complex second) = (Complex.Zero, Complex.Zero);
+        for (int k = 0; k < points; k++)
+        {
+            Complex turn = Complex.FromPolarCoordinates(1, 2 * Math.PI * k / points);
+            double envelope = Complex.Abs(1 + (upper * turn) + (lower * Complex.Conjugate(turn)));
+            first += envelope * Complex.Conjugate(turn);
+            second += envelope * Complex.Conjugate(turn * turn);
+        }
+
+        double fundamental = Complex.Abs(first);
+        return fundamental > 0 ? Complex.Abs(second) / fundamental : 0;
     }
 
     /// <summary>The larger sideband relative to the carrier, as a ratio.</summary>
@@ -64,25 +72,27 @@ public readonly record struct SidebandResponse
     public Neighbour NeighbourAt(double offsetHz) =>
         new(offsetHz, Decibel.FromRatio(Complex.Abs(_transfer.At(StationHz + offsetHz) / Carrier)));
 
-    /// <summary>The lowest audio frequency at which the audio is down by so many dB; null where it is not below 20 kHz.</summary>
-    /// <param name="downDb">Loss in dB, above 0.</param>
-    public double? AudioDownHz(double downDb)
+    /// <summary>The lowest audio frequencies in Hz at which the audio is down by so many dB; null where it is not below 20 kHz.</summary>
+    /// <param name="downDb">Losses in dB, above 0 and rising.</param>
+    public double?[] AudioDownHz(ReadOnlySpan<double> downDb)
     {
         const double first = 20, last = 20_000, ratio = 1.35;
         SidebandResponse self = this;
-        double Excess(double hz) => self.At(hz).AudioDb + downDb;
-        (double a, double fa) = (0, downDb);
-        for (double b = first; b <= last; b *= ratio)
+        double?[] found = new double?[downDb.Length];
+        (double a, double levelA) = (0, 0);
+        int next = 0;
+        for (double b = first; b <= last && next < found.Length; b *= ratio)
         {
-            double fb = Excess(b);
-            if (fb <= 0)
+            double levelB = self.At(b).AudioDb;
+            while (next < found.Length && levelB <= -downDb[next])
             {
-                return RootSearch.Between(Excess, a, fa, b, fb, 1e-10 * b);
+                double down = downDb[next];
+                found[next++] = RootSearch.Between(hz => self.At(hz).AudioDb + down, a, levelA + down, b, levelB + down, 1e-10 * b);
             }
 
-            (a, fa) = (b, fb);
+            (a, levelA) = (b, levelB);
         }
 
-        return null;
+        return found;
     }
 }
