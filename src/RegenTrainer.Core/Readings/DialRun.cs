@@ -23,7 +23,7 @@ internal static class DialRun
         ModeResult mode = state.Mode;
         var point = new DialPoint(position.DialHz, Reachable: true) { TuningFarad = mode.TuningFarad };
         ws.Keep();
-        if (mode.S.Real < 0)
+        if (TankFamily.FastestGrowing(ws, position.Query.DialHz, state).Real < 0)
         {
             Complex carrier = new Transfer(ws).At(setting.StationHz ?? position.DialHz);
             point = point with

@@ -53,7 +53,7 @@ public sealed record Reading
     /// <summary>Frequency of the tank mode in Hz.</summary>
     public double? TankHz { get; init; }
 
-    /// <summary>Real part of the tank mode in 1/s: negative decays, positive grows.</summary>
+    /// <summary>Real part of the tank mode in 1/s: negative decays, positive grows; of another tuned circuit where that one oscillates.</summary>
     public double? GrowthPerSecond { get; init; }
 
     /// <summary>Antenna electromotive force to output at the station, in dB; null above tip-over.</summary>

@@ -25,13 +25,22 @@ internal static class ReadingFigures
     {
         TankState state = position.State;
         ModeResult mode = state.Mode;
-        bool decays = mode.S.Real < 0;
+        (bool decays, double growth) = (mode.S.Real < 0, mode.S.Real);
         ws.Keep();
+        Complex fastest = TankFamily.FastestGrowing(ws, position.Query.DialHz, state);
+        if (decays && fastest.Real > 0)
+        {
+            (decays, growth) = (false, fastest.Real);
+            cautions.Add(new Caution(
+                "other-circuit-oscillates",
+                $"another tuned circuit oscillates at {QuantityText.Write(fastest.Imaginary / (2 * Math.PI), Unit.Hertz, 4)}"));
+        }
+
         reading = reading with
         {
             TuningFarad = mode.TuningFarad,
             TankHz = mode.Hz,
-            GrowthPerSecond = mode.S.Real,
+            GrowthPerSecond = growth,
             EffectiveQ = decays ? mode.Q : null,
             RingTimeSeconds = decays ? -1 / mode.S.Real : null,
             HandShiftHz = ModeSolver.ByTuning(ws.Circuit, mode.S).Imaginary / (2 * Math.PI) * HandFarad,
@@ -55,7 +64,7 @@ internal static class ReadingFigures
             QRegenerationOff = qOff,
             PulledHz = pulled,
             MarginDb = decays && qOff is { } off ? Margin.LoopGainDb(mode.Q, off) : null,
-            Regime = qOff is { } q ? Margin.RegimeOf(mode.S.Real, mode.Q, q) : null,
+            Regime = qOff is { } q ? Margin.RegimeOf(growth, mode.Q, q) : null,
         };
         reading = WithControl(reading, ws, position, setting, cautions);
         AddCautions(reading, ws, cautions);

@@ -59,7 +59,7 @@ public static class StageReader
     public static IReadOnlyList<ResponsePoint> Response(StageWorkspace ws, Setting setting, IReadOnlyList<double> hz)
     {
         Position position = Position.Solve(ws, setting, TankHint.None);
-        if (!position.State.Found || !position.Reachable || position.State.Mode.S.Real >= 0)
+        if (!position.State.Found || !position.Reachable || TankFamily.FastestGrowing(ws, position.Query.DialHz, position.State).Real >= 0)
         {
             return [];
         }
@@ -80,7 +80,7 @@ public static class StageReader
     public static IReadOnlyList<Neighbour> Neighbours(StageWorkspace ws, Setting setting)
     {
         Position position = Position.Solve(ws, setting, TankHint.None);
-        if (!position.State.Found || !position.Reachable || position.State.Mode.S.Real >= 0)
+        if (!position.State.Found || !position.Reachable || TankFamily.FastestGrowing(ws, position.Query.DialHz, position.State).Real >= 0)
         {
             return [];
         }

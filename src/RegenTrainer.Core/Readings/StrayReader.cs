@@ -8,13 +8,7 @@ namespace RegenTrainer.Core.Readings;
 /// <summary>All natural frequencies that do not belong to the tuned circuit, each with the losses at its own frequency.</summary>
 internal static class StrayReader
 {
-    /// <summary>Modes within this factor of the dial belong to the tank family.</summary>
-    public const double FamilyFactor = 2;
-
     private const int LossSteps = 3;
-
-    /// <summary>A mode that dies within a fifth of a cycle is no oscillation worth a line, unless it grows.</summary>
-    private const double SmallestQ = 0.5;
 
     /// <summary>A growth below this fraction of the dial is the rounding of a mode that stands still, as of coils in parallel.</summary>
     private const double RealNoise = 1e-7;
@@ -33,9 +27,7 @@ internal static class StrayReader
         var strays = new List<StrayMode>();
         foreach (SpectralMode mode in modes)
         {
-            double hz = mode.S.Imaginary / (2 * Math.PI);
-            bool family = hz > query.DialHz / FamilyFactor && hz < query.DialHz * FamilyFactor && Rings(mode.S);
-            if (family || !(Rings(mode.S) || mode.S.Real > RealNoise * query.DialHz))
+            if (TankFamily.Contains(mode.S, query.DialHz) || !(TankFamily.Rings(mode.S) || mode.S.Real > RealNoise * query.DialHz))
             {
                 continue;
             }
@@ -55,8 +47,6 @@ internal static class StrayReader
 
         return reading with { StrayModes = strays, Parasitic = parasitic };
     }
-
-    private static bool Rings(Complex s) => s.Imaginary > 0 && Complex.Abs(s) > 2 * SmallestQ * Math.Abs(s.Real) * (1 + 1e-9);
 
     private static Complex AtOwnLoss(StageWorkspace ws, in TankQuery query, in TankState state, SpectralMode mode)
     {

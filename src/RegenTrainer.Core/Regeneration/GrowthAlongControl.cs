@@ -47,6 +47,14 @@ internal struct GrowthAlongControl
         Complex byControl = ControlSlope.Total(_ws, State, value) * (_logarithmic ? value : 1);
         growth = State.Mode.S.Real;
         slope = byControl.Real;
+        Complex fastest = TankFamily.FastestGrowing(_ws, _query.DialHz, State);
+        if (fastest != State.Mode.S)
+        {
+            // Another tuned circuit leads: its growth counts, and its slope is not at hand.
+            (growth, slope) = (fastest.Real, double.NaN);
+            return true;
+        }
+
         if (_query.FollowRadians is not null)
         {
             Complex byTuning = ModeSolver.ByTuning(_ws.Circuit, State.Mode.S);

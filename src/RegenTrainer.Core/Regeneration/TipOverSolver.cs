@@ -87,6 +87,11 @@ public static class TipOverSolver
     /// <summary>Place in 0..1 of the cubic's extremum beyond or within a twentieth of zero; null where there is none.</summary>
     private static double? Excursion(double f0, double d0, double f1, double d1)
     {
+        if (double.IsNaN(d0) || double.IsNaN(d1))
+        {
+            return null;
+        }
+
         double sign = Math.Sign(f0);
         double c2 = (3 * (f1 - f0)) - (2 * d0) - d1, c3 = (2 * (f0 - f1)) + d0 + d1;
         double discriminant = (c2 * c2) - (3 * c3 * d0);

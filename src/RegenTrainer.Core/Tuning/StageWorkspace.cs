@@ -32,6 +32,9 @@ public sealed class StageWorkspace
     /// <summary>The buffers of its network.</summary>
     public Workspace Circuit { get; }
 
+    /// <summary>Lightly damped modes found when the tank was last labelled: more than one where tuned circuits are coupled.</summary>
+    internal int Resonances { get; set; }
+
     internal Complex[] SavedShape { get; }
 
     internal Complex[] SavedLeftShape { get; }

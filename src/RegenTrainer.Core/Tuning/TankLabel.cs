@@ -21,9 +21,10 @@ public static class TankLabel
     /// <param name="dialHz">Dial in Hz.</param>
     /// <param name="tuningFarad">The tuning capacitor of the present pencil, in farad.</param>
     /// <param name="s">The mode's natural frequency in 1/s.</param>
-    public static bool TryFind(Workspace w, double dialHz, double tuningFarad, out Complex s)
+    /// <param name="resonances">How many lightly damped modes there are: more than one where circuits are coupled.</param>
+    public static bool TryFind(Workspace w, double dialHz, double tuningFarad, out Complex s, out int resonances)
     {
-        s = default;
+        (s, resonances) = (default, 0);
         if (w.Network.Tuning is not { } tuning || ModeSpectrum.TryFind(w, 2 * Math.PI * dialHz) is not { } modes)
         {
             return false;
@@ -38,6 +39,7 @@ public static class TankLabel
                 continue;
             }
 
+            resonances++;
             double volt = Complex.Abs(NetworkValues.Across(mode.Shape, tuning.Pair.From, tuning.Pair.To));
             double share = tuningFarad * volt * volt / Energy(w, mode.Shape);
             double distance = Math.Abs(Math.Log(mode.S.Imaginary / (2 * Math.PI * dialHz)));

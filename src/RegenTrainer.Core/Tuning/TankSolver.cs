@@ -82,11 +82,12 @@ public static class TankSolver
         Workspace w = ws.Circuit;
         double farad = query.FollowRadians is null ? query.LockedFarad : FirstGuess(ws.Model.Circuit.Dial.Capacitor);
         w.Values.SetPencil(farad, query.ControlValue, w.Linear, 0);
-        if (!TankLabel.TryFind(w, query.DialHz, farad, out System.Numerics.Complex s))
+        if (!TankLabel.TryFind(w, query.DialHz, farad, out System.Numerics.Complex s, out int resonances))
         {
             return new ModeResult(default, farad, SolveStop.ModeLost, 0, double.NaN, 0);
         }
 
+        ws.Resonances = resonances;
         ModeResult mode = ModeSolver.Polish(w, s, farad, query.FollowRadians);
         double share = 0, step = Share(query);
         while (mode.Found && share < Share(query))

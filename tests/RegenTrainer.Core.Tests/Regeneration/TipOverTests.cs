@@ -1,7 +1,9 @@
 using System.Numerics;
 using RegenTrainer.Core.Circuits;
+using RegenTrainer.Core.Coils;
 using RegenTrainer.Core.Controls;
 using RegenTrainer.Core.Devices;
+using RegenTrainer.Core.Quantities;
 using RegenTrainer.Core.Readings;
 using RegenTrainer.Core.Regeneration;
 using RegenTrainer.Core.Stages;
@@ -117,6 +119,37 @@ public sealed class TipOverTests
         Assert.Equal(Regime.Oscillating, stage.Read(1e6, between).Regime);
         Assert.True(stage.Read(1e6, tip.Crossings[0].TravelPercent - 0.01).GrowthPerSecond < 0);
         Assert.True(stage.Read(1e6, tip.Crossings[1].TravelPercent + 0.01).GrowthPerSecond < 0);
+    }
+
+    // The feedback sits on a second circuit tuned 30 % higher: that one tips over, and the tuned one goes on decaying.
+    [Fact]
+    public void A_second_tuned_circuit_that_tips_over_counts()
+    {
+        const double farad = 100e-12;
+        double first = 1 / (Math.Pow(2 * Math.PI * 1e6, 2) * farad), second = 1 / (Math.Pow(2 * Math.PI * 1.3e6, 2) * farad);
+        IReadOnlyList<Part> Parts(double factor) =>
+        [
+            new Antenna("source", "source", Part.Earth), new Resistor("feed", "source", "first", 1e7),
+            new Windings("coils", [("first", Part.Earth), ("second", Part.Earth)], new CoupledSections(
+                [new InductiveSection(first, 100), new InductiveSection(second, 100)], [new SectionCoupling(0, 1, 0.02)])),
+            new Capacitor("tuning", "first", Part.Earth, farad) { Role = PartRole.Tuning },
+            new Capacitor("fixed", "second", Part.Earth, farad),
+            new Feedback("feedback", "second", Part.Earth, Part.Earth, "second", 1e-3, factor) { Role = PartRole.Regeneration },
+        ];
+        var stage = new StageUnderTest(FreeFamily.Design(Parts(0), "first", new VariableCapacitor(10e-12, 500e-12), new LinearControl(0, 0.02), Unit.None));
+        Setting At(double travel) => new(1e6, travel) { DialMode = DialMode.Locked, LockedFarad = farad };
+        TipOver tip = stage.Read(At(0)).TipOver!;
+        Assert.Equal(TipOverState.Once, tip.State);
+        Crossing crossing = tip.First!.Value;
+        Reading above = stage.Read(At(crossing.TravelPercent + 0.5));
+        Assert.Equal(Regime.Oscillating, above.Regime);
+        Assert.Null(above.EffectiveQ);
+        Assert.Contains(above.Cautions, c => c.Code == "other-circuit-oscillates");
+        foreach (double factor in new[] { 0.99, 1.01 })
+        {
+            RingReading truth = new CarrierLevelOracle(Parts(crossing.Value * factor), Grade.Typical, 20, 1e6).SmallSignalRing("second", 1.3e6, 2000, 240, "second");
+            Assert.Equal(factor > 1, truth.GrowthPerS > 0);
+        }
     }
 
     // Landon and Jarvis: T = 1 - Q/Q_eff is the loop gain, so a device 1/T stronger tips the stage where the loop is a plain
