@@ -15,7 +15,7 @@ public sealed class LiveStage
     /// <summary>The margin in dB at which <see cref="StandBelowTipOver"/> stops.</summary>
     public const double StandingMarginDb = 0.3;
 
-    private const double LowestVolt = 0.1;
+    private const double LowestVolt = 0;
     private const double HighestVolt = 1000;
     private const double LowestCelsius = -40;
     private const double HighestCelsius = 85;

@@ -1,0 +1,66 @@
+namespace RegenTrainer.Drawing;
+
+/// <summary>A plot of dots, several to a cell.</summary>
+internal sealed class DotGrid
+{
+    private readonly Glyphs _glyphs;
+    private readonly int _columns;
+    private readonly int _rows;
+    private readonly byte[] _bits;
+
+    public DotGrid(int columns, int rows, Glyphs glyphs)
+    {
+        (_columns, _rows, _glyphs) = (columns, rows, glyphs);
+        _bits = new byte[columns * rows];
+    }
+
+    /// <summary>Dots side by side.</summary>
+    public int Width => _columns * _glyphs.DotsAcross;
+
+    /// <summary>Dots one above the other.</summary>
+    public int Height => _rows * _glyphs.DotsDown;
+
+    /// <summary>Draws a line between two points in dots; what lies outside is cut off.</summary>
+    public void Line(double x0, double y0, double x1, double y1)
+    {
+        double steps = Math.Ceiling(Math.Max(Math.Abs(x1 - x0), Math.Min(Math.Abs(y1 - y0), 4.0 * Height)));
+        for (int k = 0; k <= steps; k++)
+        {
+            double t = steps == 0 ? 0 : k / steps;
+            Dot((int)Math.Round(x0 + ((x1 - x0) * t)), (int)Math.Round(y0 + ((y1 - y0) * t)));
+        }
+    }
+
+    /// <summary>The uppermost row of cells a column has a dot in; the number of rows where it has none.</summary>
+    public int TopOf(int column)
+    {
+        int row = 0;
+        while (row < _rows && _bits[(row * _columns) + column] == 0)
+        {
+            row++;
+        }
+
+        return row;
+    }
+
+    /// <summary>Copies the cells that have dots to a screen.</summary>
+    public void CopyTo(Canvas canvas, int left, int top, Ink ink)
+    {
+        for (int k = 0; k < _bits.Length; k++)
+        {
+            if (_bits[k] != 0)
+            {
+                canvas.Set(left + (k % _columns), top + (k / _columns), _glyphs.Pattern(_bits[k]), ink);
+            }
+        }
+    }
+
+    private void Dot(int x, int y)
+    {
+        if ((uint)x < (uint)Width && (uint)y < (uint)Height)
+        {
+            (int across, int down) = (_glyphs.DotsAcross, _glyphs.DotsDown);
+            _bits[(y / down * _columns) + (x / across)] |= _glyphs.Bit(x % across, y % down);
+        }
+    }
+}

@@ -1,0 +1,144 @@
+using RegenTrainer.Core.Quantities;
+using RegenTrainer.Core.Selectivity;
+using RegenTrainer.Session;
+
+namespace RegenTrainer.Drawing;
+
+/// <summary>The response around the station, with the span of the programme's sidebands shaded beneath.</summary>
+internal static class ResponsePlot
+{
+    /// <summary>Columns of the scale in dB.</summary>
+    public const int ScaleWidth = 6;
+
+    /// <summary>Rows beside the curve itself: heading, neighbours, rule and scale in kHz.</summary>
+    private const int OtherRows = 4;
+
+    /// <summary>The scale divides into eighths of its span.</summary>
+    private const int ColumnParts = 8;
+
+    private const double SpanKhz = LiveStage.HalfSpanHz / 1000;
+
+    /// <summary>The scales in dB below the peak there are: the first that holds the curve is taken.</summary>
+    private static readonly int[] _depthsDb = [40, 60, 80, 100, 120];
+
+    /// <summary>Evenly spaced points of the response that a plot of this width can show.</summary>
+    public static int PointsFor(Region region, Glyphs glyphs) => Math.Max(2, (region.Width - ScaleWidth) * glyphs.DotsAcross);
+
+    /// <summary>The largest width up to <paramref name="room"/> at which the station, its neighbours and its channel's ends stand in columns of their own.</summary>
+    public static int EvenWidth(int room) => room - ((room - ScaleWidth - 1) % ColumnParts);
+
+    public static void Draw(Canvas canvas, Region region, StageSnapshot stage)
+    {
+        canvas.Put(region.Left, region.Top, "response, \u00b120 kHz around the station", Ink.Label, region.Right);
+        if (stage.Curve.Count < 2)
+        {
+            NoResponse(canvas, region with { Top = region.Top + 2, Height = region.Height - 2 }, stage);
+            return;
+        }
+
+        var plot = new Region(region.Left + ScaleWidth, region.Top + 2, region.Width - ScaleWidth, region.Height - OtherRows);
+        double stationHz = stage.Reading.Setting.StationHz;
+        double peakDb = stage.Curve.Max(point => point.GainDb);
+        double lowestDb = stage.Curve.Min(point => point.GainDb) - peakDb;
+        int depth = Array.Find(_depthsDb, d => lowestDb >= -d) is > 0 and var found ? found : _depthsDb[^1];
+        var grid = new DotGrid(plot.Width, plot.Height, canvas.Glyphs);
+        double ToX(double hz) => (hz - stationHz + LiveStage.HalfSpanHz) / (2 * LiveStage.HalfSpanHz) * (grid.Width - 1);
+        double ToY(double db) => Math.Clamp((peakDb - db) / depth, -1, 2) * (grid.Height - 1);
+        for (int k = 1; k < stage.Curve.Count; k++)
+        {
+            (ResponsePoint a, ResponsePoint b) = (stage.Curve[k - 1], stage.Curve[k]);
+            grid.Line(ToX(a.FrequencyHz), ToY(a.GainDb), ToX(b.FrequencyHz), ToY(b.GainDb));
+        }
+
+        Shade(canvas, plot, grid, stage.Dial.StepHz / 2);
+        grid.CopyTo(canvas, plot.Left, plot.Top, Ink.Response);
+        DecibelScale(canvas, region.Left, plot, depth);
+        KilohertzScale(canvas, plot);
+        Neighbours(canvas, region, plot, grid, stage);
+    }
+
+    /// <summary>The column of a distance from the station.</summary>
+    internal static int ColumnOf(Region plot, double offsetHz) =>
+        plot.Left + (int)Math.Round((offsetHz + LiveStage.HalfSpanHz) / (2 * LiveStage.HalfSpanHz) * (plot.Width - 1), MidpointRounding.AwayFromZero);
+
+    /// <summary>The programme reaches half the raster to either side of its carrier (common practice of the channel raster).</summary>
+    private static void Shade(Canvas canvas, Region plot, DotGrid grid, double halfChannelHz)
+    {
+        for (int column = ColumnOf(plot, -halfChannelHz); column <= ColumnOf(plot, halfChannelHz); column++)
+        {
+            for (int row = grid.TopOf(column - plot.Left) + 1; row < plot.Height; row++)
+            {
+                canvas.Set(column, plot.Top + row, canvas.Glyphs.Shade, Ink.Sidebands);
+            }
+        }
+    }
+
+    private static void DecibelScale(Canvas canvas, int left, Region plot, int depth)
+    {
+        for (int db = 0; db <= depth; db += 20)
+        {
+            int row = plot.Top + (int)Math.Round((plot.Height - 1) * db / (double)depth);
+            canvas.PutBefore(left + ScaleWidth - 1, row, db == 0 ? "dB 0" : Figures.Fixed(-db, "0"), Ink.Label);
+        }
+    }
+
+    private static void KilohertzScale(Canvas canvas, Region plot)
+    {
+        for (int column = plot.Left; column < plot.Right; column++)
+        {
+            canvas.Set(column, plot.Bottom, canvas.Glyphs.Rule, Ink.Label);
+        }
+
+        for (double khz = -SpanKhz; khz <= SpanKhz; khz += SpanKhz / 2)
+        {
+            int column = ColumnOf(plot, khz * 1000);
+            canvas.Set(column, plot.Bottom, canvas.Glyphs.Tick, Ink.Label);
+            string label = Figures.Signed(khz, "0");
+            if (khz == SpanKhz)
+            {
+                canvas.PutBefore(plot.Right, plot.Bottom + 1, label + " kHz", Ink.Label);
+            }
+            else
+            {
+                canvas.Put(column - (khz == -SpanKhz ? 0 : label.Length / 2), plot.Bottom + 1, label, Ink.Label);
+            }
+        }
+    }
+
+    /// <summary>How much of the next channels is heard, and where they lie on the curve.</summary>
+    private static void Neighbours(Canvas canvas, Region region, Region plot, DotGrid grid, StageSnapshot stage)
+    {
+        var next = stage.Neighbours.Where(n => Math.Abs(Math.Abs(n.OffsetHz) - stage.Dial.StepHz) < 1).ToList();
+        if (next.Count == 0)
+        {
+            return;
+        }
+
+        string words = string.Join(", ", next.Select(n => $"{Figures.Signed(n.OffsetHz / 1000, "0.##")} kHz {Figures.Level(n.RelativeDb)}"));
+        canvas.Put(region.Left, region.Top + 1, "o neighbours " + words, Ink.Text, region.Right);
+        foreach (Neighbour neighbour in next.Where(n => Math.Abs(n.OffsetHz) < LiveStage.HalfSpanHz))
+        {
+            int column = ColumnOf(plot, neighbour.OffsetHz);
+            int row = grid.TopOf(column - plot.Left);
+            if (row < plot.Height)
+            {
+                canvas.Set(column, plot.Top + row, "o", Ink.Text);
+            }
+        }
+    }
+
+    private static void NoResponse(Canvas canvas, Region region, StageSnapshot stage)
+    {
+        if (stage.Reading is { GrowthPerSecond: > 0 and var growth, TankHz: { } hz })
+        {
+            canvas.Put(region.Left, region.Top, "no response is drawn: the stage oscillates", Ink.Oscillating, region.Right);
+            canvas.Put(region.Left, region.Top + 2, $"at {Figures.Tank(hz)}, as it begins", Ink.Text, region.Right);
+            string time = Figures.Quantity(1 / growth, Unit.Second);
+            canvas.Put(region.Left, region.Top + 3, $"the amplitude grows to 2.72 times in {time}", Ink.Text, region.Right);
+            return;
+        }
+
+        string words = stage.Reading.TankHz is null ? "no response: no tank is found at this setting" : "no response: it could not be solved here";
+        canvas.PutWrapped(region, stage.Reading.Reachable ? words : "no response: the dial is out of the capacitor's reach", Ink.Text);
+    }
+}
