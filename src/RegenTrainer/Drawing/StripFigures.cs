@@ -13,10 +13,16 @@ internal static class StripFigures
     /// <summary>Narrower screens have the short form, whatever the figures, so that it does not change to and fro.</summary>
     private const int FullFrom = 100;
 
+    /// <summary>Columns kept for the outer figures at their longest, so that what stands between them stays in place.</summary>
+    private const int AtRoom = 27;
+
+    /// <inheritdoc cref="AtRoom"/>
+    private const int LeftRoom = 33;
+
     public static void Draw(Canvas canvas, int row, StageSnapshot stage)
     {
         (string at, string tips, string left) = (At(stage, full: true), Tips(stage, full: true), Left(stage, full: true));
-        int middle = (canvas.Width - canvas.WidthOf(tips)) / 2;
+        int middle = AtRoom + ((canvas.Width - AtRoom - LeftRoom - canvas.WidthOf(tips)) / 2);
         int afterAt = 1 + canvas.WidthOf(at) + LeastGap, beforeLeft = canvas.Width - 1 - canvas.WidthOf(left) - LeastGap;
         if (canvas.Width >= FullFrom && middle >= afterAt && middle + canvas.WidthOf(tips) <= beforeLeft)
         {

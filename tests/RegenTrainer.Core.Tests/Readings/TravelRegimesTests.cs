@@ -24,7 +24,7 @@ public sealed class TravelRegimesTests
     public void Stretches_join_from_stop_to_stop_and_change_the_regime(double dialHz, DialMode mode)
     {
         IReadOnlyList<RegimeSpan> spans = TravelRegimes.Find(_workspace, new Setting(dialHz, 0) { DialMode = mode });
-        Assert.Equal((0, 100), (spans[0].FromPercent, spans[^1].ToPercent));
+        Assert.Equal((0.0, 100.0), (spans[0].FromPercent, spans[^1].ToPercent));
         for (int k = 1; k < spans.Count; k++)
         {
             Assert.Equal(spans[k - 1].ToPercent, spans[k].FromPercent);
@@ -62,6 +62,6 @@ public sealed class TravelRegimesTests
         // A large resistor in series with the control keeps the stage far from regenerating.
         var weak = new StageWorkspace(StageModel.Compile(DefaultStage.With("regeneration.series.value", 100e3)));
         RegimeSpan only = Assert.Single(TravelRegimes.Find(weak, new Setting(1e6, 0)));
-        Assert.Equal((0, 100, StageReader.Read(weak, new Setting(1e6, 100), []).Regime), (only.FromPercent, only.ToPercent, only.Regime));
+        Assert.Equal((0.0, 100.0, StageReader.Read(weak, new Setting(1e6, 100), []).Regime!.Value), (only.FromPercent, only.ToPercent, only.Regime));
     }
 }

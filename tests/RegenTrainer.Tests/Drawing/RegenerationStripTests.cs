@@ -55,7 +55,7 @@ public sealed class RegenerationStripTests
 
     [Theory]
     [InlineData(80, "54.00 % 4k65 | tips 60.00 % 4k06 | left 6.00 % 0.92 dB")]
-    [InlineData(100, "at 54.00 % \u00b7 162\u00b0 \u00b7 4k65      tips over at 60.00 % \u00b7 180\u00b0 \u00b7 4k06     left 6.00 % \u00b7 18.0\u00b0 \u00b7 0.92 dB")]
+    [InlineData(100, "at 54.00 % \u00b7 162\u00b0 \u00b7 4k65     tips over at 60.00 % \u00b7 180\u00b0 \u00b7 4k06      left 6.00 % \u00b7 18.0\u00b0 \u00b7 0.92 dB")]
     public void Figures_stand_under_the_strip(int width, string expected)
     {
         // An even control from 10k to 100R: 54 % is 10000 - 0.54 x 9900 = 4654 ohm, 60 % is 4060 ohm; 300 degrees of rotation.
