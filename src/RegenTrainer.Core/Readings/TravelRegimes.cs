@@ -67,7 +67,7 @@ public static class TravelRegimes
                 return null;
             }
 
-            double growth = position.State.Mode.S.Real;
+            double growth = TankFamily.FastestGrowing(ws, position.Query.DialHz, position.State).Real;
             if (growth > 0)
             {
                 return Regime.Oscillating;

@@ -13,6 +13,9 @@ internal static class ResponsePlot
     /// <summary>Rows beside the curve itself: heading, neighbours, rule and scale in kHz.</summary>
     private const int OtherRows = 4;
 
+    /// <summary>The caution that names the frequency where it is not the tank that oscillates.</summary>
+    private const string OtherCircuitCode = "other-circuit-oscillates";
+
     /// <summary>The scale divides into eighths of its span.</summary>
     private const int ColumnParts = 8;
 
@@ -132,7 +135,8 @@ internal static class ResponsePlot
         if (stage.Reading is { GrowthPerSecond: > 0 and var growth, TankHz: { } hz })
         {
             canvas.Put(region.Left, region.Top, "no response is drawn: the stage oscillates", Ink.Oscillating, region.Right);
-            canvas.Put(region.Left, region.Top + 2, $"at {Figures.Tank(hz)}, as it begins", Ink.Text, region.Right);
+            string where = stage.Reading.Cautions.FirstOrDefault(c => c.Code == OtherCircuitCode)?.Text ?? $"at {Figures.Tank(hz)}, as it begins";
+            canvas.Put(region.Left, region.Top + 2, where, Ink.Text, region.Right);
             string time = Figures.Quantity(1 / growth, Unit.Second);
             canvas.Put(region.Left, region.Top + 3, $"the amplitude grows to 2.72 times in {time}", Ink.Text, region.Right);
             return;

@@ -83,6 +83,15 @@ public sealed class StagePageTests
     }
 
     [Fact]
+    public void Where_another_circuit_oscillates_its_frequency_is_said_in_place_of_the_tank_s()
+    {
+        var stage = new MadeUpStage((60, true)) { Cautions = [new Caution("other-circuit-oscillates", "another tuned circuit oscillates at 1.07 MHz")] };
+        IReadOnlyList<string> rows = Pages.Draw(stage, 70, 100, 30).Rows();
+        Assert.Contains(rows, row => row.StartsWith(" another tuned circuit oscillates at 1.07 MHz", StringComparison.Ordinal));
+        Assert.DoesNotContain(rows, row => row.Contains("as it begins", StringComparison.Ordinal));
+    }
+
+    [Fact]
     public void Out_of_reach_is_said_where_the_figures_stood()
     {
         string text = Pages.Text(Pages.Draw(_once, 40, 80, 24, dialHz: 1600e3));
