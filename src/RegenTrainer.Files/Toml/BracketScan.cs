@@ -32,7 +32,11 @@ internal ref struct BracketScan(string text)
         }
 
         char c = text[_next++];
-        _column++;
+        if (!char.IsLowSurrogate(c))
+        {
+            _column++;   // both halves of a character beyond the first 65,536 stand in one column
+        }
+
         if (c == '\n')
         {
             Unclosed = _quote != '\0' && !_long ? _opened : null;
@@ -58,7 +62,7 @@ internal ref struct BracketScan(string text)
         }
         else if (c == _quote && (!_long || Triple()))
         {
-            Skip(_long ? 2 : 0);
+            Skip(_long ? 2 + QuotesBeforeTheLastThree() : 0);
             _quote = '\0';
         }
     }
@@ -88,6 +92,18 @@ internal ref struct BracketScan(string text)
 
     /// <summary>Whether the character just taken is the first of three quotes.</summary>
     private readonly bool Triple() => _next + 1 < text.Length && text[_next] == text[_next - 1] && text[_next + 1] == text[_next - 1];
+
+    /// <summary>Quotes of the text itself, one or two, may stand right before the three that close it [TOML 1.0].</summary>
+    private readonly int QuotesBeforeTheLastThree()
+    {
+        int quotes = 0;
+        while (quotes < 2 && _next + 2 + quotes < text.Length && text[_next + 2 + quotes] == _quote)
+        {
+            quotes++;
+        }
+
+        return quotes;
+    }
 
     private void Skip(int characters)
     {
