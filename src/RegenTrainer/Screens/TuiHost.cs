@@ -24,7 +24,6 @@ internal static class TuiHost
     private static int _restored;
     private static int _signalExit;
     private static int _signals;
-    private static Timer? _lastResort;
 
     /// <summary>Whether a screen can be shown: a terminal is there, and it can place text.</summary>
     public static bool CanRun() => Driver.IsAttachedToTerminal(out _, out _) && Environment.GetEnvironmentVariable("TERM") != "dumb";
@@ -101,7 +100,7 @@ internal static class TuiHost
 
         // Where the terminal is gone the screen's loop may never look at the flag below: then the program ends without it.
         int exit = _signalExit;
-        _lastResort = new Timer(_ => Environment.Exit(exit), null, PatienceMilliseconds, Timeout.Infinite);
+        _ = Task.Delay(PatienceMilliseconds).ContinueWith(_ => Environment.Exit(exit), TaskScheduler.Default);
 
         // A plain flag: handing the request to the screen's own thread could block while a timer of it runs.
         foreach (SessionToken session in app.SessionStack ?? [])
