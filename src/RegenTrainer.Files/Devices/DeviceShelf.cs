@@ -5,7 +5,7 @@ namespace RegenTrainer.Files.Devices;
 /// <summary>
 /// Where device names are looked up: beside the stage file, then in the user's devices folder, then among those that ship.
 /// </summary>
-public sealed class DeviceShelf
+public sealed class DeviceShelf : IDeviceSource
 {
     private static readonly Lazy<IReadOnlyDictionary<string, BipolarModel>> _shipped = new(ReadShipped);
 
@@ -21,22 +21,23 @@ public sealed class DeviceShelf
 
     /// <summary>A shelf that looks into a folder first, then into the user's, then among those that ship.</summary>
     /// <param name="folder">The folder of the stage file.</param>
-    public static DeviceShelf Beside(string folder) => new([folder, UserFolder()]);
+    public static DeviceShelf Beside(string folder) => new(UserFolder() is { } own ? [folder, own] : [folder]);
 
     /// <summary>Every name that can be had, shipped ones first.</summary>
     public IReadOnlyList<string> Names =>
-        [.. ShippedNames.Concat(_folders.SelectMany(FilesIn).Select(f => Path.GetFileNameWithoutExtension(f).ToUpperInvariant())).Distinct(StringComparer.OrdinalIgnoreCase)];
+    [
+        .. ShippedNames.Concat(_folders.SelectMany(FilesIn).Where(f => TextOf(f) is not null).Select(Stem))
+            .Distinct(StringComparer.OrdinalIgnoreCase),
+    ];
 
     /// <summary>Finds a device by name, letter case aside.</summary>
     /// <param name="name">The registered type.</param>
-    /// <returns>The device, or why it cannot be had: no such name, or the faults of its file.</returns>
+    /// <returns>The device or the faults of its file; null where there is none of that name.</returns>
     public DeviceReadResult? Find(string name)
     {
-        foreach (string file in _folders.SelectMany(FilesIn))
+        foreach (string file in _folders.SelectMany(FilesIn).Where(f => string.Equals(Stem(f), name, StringComparison.OrdinalIgnoreCase)))
         {
-            if (string.Equals(Path.GetFileNameWithoutExtension(file), name, StringComparison.OrdinalIgnoreCase)
-                && TextFiles.TryRead(file, out string text, out _)
-                && text.Contains(DeviceText.Format, StringComparison.Ordinal))
+            if (TextOf(file) is { } text)
             {
                 return DeviceText.Read(text, Path.GetFileName(file));
             }
@@ -44,6 +45,12 @@ public sealed class DeviceShelf
 
         return _shipped.Value.TryGetValue(name, out BipolarModel? model) ? new DeviceReadResult(model, []) : null;
     }
+
+    private static string Stem(string file) => Path.GetFileNameWithoutExtension(file);
+
+    /// <summary>The text of a device file of whatever format number; null for a stage file beside it, or what cannot be read.</summary>
+    private static string? TextOf(string file) =>
+        TextFiles.TryRead(file, out string text, out _) && text.Contains(DeviceText.AnyFormat, StringComparison.Ordinal) ? text : null;
 
     private static IReadOnlyList<string> FilesIn(string folder)
     {
@@ -57,11 +64,16 @@ public sealed class DeviceShelf
         }
     }
 
-    private static string UserFolder() => Path.Combine(
-        Environment.GetEnvironmentVariable("XDG_CONFIG_HOME") is { Length: > 0 } home
-            ? home
-            : Environment.GetFolderPath(Environment.SpecialFolder.ApplicationData),
-        "regentrainer", "devices");
+    /// <summary>
+    /// The user's devices folder; null where there is no home to have one in. A relative XDG_CONFIG_HOME counts as none
+    /// [XDG Base Directory Specification].
+    /// </summary>
+    private static string? UserFolder()
+    {
+        string? named = Environment.GetEnvironmentVariable("XDG_CONFIG_HOME");
+        string home = Path.IsPathFullyQualified(named ?? "") ? named! : Environment.GetFolderPath(Environment.SpecialFolder.ApplicationData);
+        return home.Length > 0 ? Path.Combine(home, "regentrainer", "devices") : null;
+    }
 
     private static Dictionary<string, BipolarModel> ReadShipped()
     {

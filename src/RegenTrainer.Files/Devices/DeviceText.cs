@@ -15,6 +15,9 @@ public static class DeviceText
     /// <summary>The format this program reads.</summary>
     public const string Format = "regentrainer.device/1";
 
+    /// <summary>What every device file has in its format, whatever its number.</summary>
+    internal const string AnyFormat = "regentrainer.device/";
+
     /// <summary>Reads a device file.</summary>
     /// <param name="text">Its text.</param>
     /// <param name="fileName">Its name for messages.</param>

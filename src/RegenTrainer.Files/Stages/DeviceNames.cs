@@ -7,7 +7,9 @@ namespace RegenTrainer.Files.Stages;
 /// <summary>Looks up a device named in a stage file, with the fault where it cannot be had.</summary>
 internal static class DeviceNames
 {
-    public static bool TryFind(TableReader reader, DeviceShelf shelf, TomlText name, out BipolarModel? model)
+    private const int MostNames = 12;
+
+    public static bool TryFind(TableReader reader, IDeviceSource source, TomlText name, out BipolarModel? model)
     {
         model = null;
         if (name.Text.AsSpan().IndexOfAny('/', '\\', '\0') >= 0 || name.Text.Contains("..", StringComparison.Ordinal))
@@ -16,16 +18,23 @@ internal static class DeviceNames
             return false;
         }
 
-        DeviceReadResult? found = shelf.Find(name.Text);
+        DeviceReadResult? found = source.Find(name.Text);
         model = found?.Model;
         if (model is not null)
         {
             return true;
         }
 
-        reader.Refuse(name.At, found is null ? name.Phrase : $"{name.Phrase} with faults: {found.Faults[0]}", found is null
-            ? TableReader.Words([.. shelf.Names.Take(12)]) + " from the shelf"
-            : "a device file without faults");
+        if (found is null)
+        {
+            reader.Refuse(name.At, name.Phrase, TableReader.Words([.. source.Names.Take(MostNames)]) + " from the shelf");
+        }
+        else
+        {
+            reader.Refuse(name.At, $"{name.Phrase}, whose device file has faults", "a device file without faults");
+            reader.Faults.AddRange(found.Faults.Except(reader.Faults));
+        }
+
         return false;
     }
 }

@@ -124,6 +124,11 @@ internal static class PartNotation
                 line("sections", "[" + string.Join(", ", sections.Sections.Select((s, i) =>
                     $"{{ between = {Names(part.SectionNodes[i].From, part.SectionNodes[i].To)}, inductance = {Notation.Number(s.Henry)}"
                     + (s.Q is { } own ? $", q = {Notation.Number(own)}" : "") + $", resistance = {Notation.Number(s.SeriesOhm)} }}")) + "]");
+                if (sections.SelfCapacitanceFarad is [> 0 and double across])
+                {
+                    number("self_capacitance", across);
+                }
+
                 line("coupling", "[" + string.Join(", ", sections.Couplings.Select(c =>
                     $"[{c.First + 1}, {c.Second + 1}, {Notation.Number(c.Factor)}]")) + "]");
                 break;

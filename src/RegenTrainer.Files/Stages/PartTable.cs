@@ -15,44 +15,35 @@ internal static class PartTable
     public static readonly IReadOnlyList<string> Kinds =
         ["resistor", "capacitor", "inductor", "bead", "windings", "bipolar", "supply", "antenna", "feedback"];
 
-    private const double Least = 1e-18;
-    private const double Most = 1e15;
+    private const int LongestName = 100;
+    private const double LeastQ = 0.01;
+    private const double MostQ = 1e9;
 
     /// <summary>The part, or null with its faults noted.</summary>
-    public static Part? Read(TableReader table, DeviceShelf shelf)
+    public static Part? Read(TableReader table, IDeviceSource source)
     {
         int before = table.Faults.Count;
         string? kind = table.Choice("kind", Kinds, required: true);
-        string name = table.Text("name", required: kind is not null, "a name for the part") ?? "";
-        Part? part = null;
-        try
+        string name = Name(table, "name", "a name for the part", required: kind is not null) ?? "";
+        Part? part = kind switch
         {
-            part = kind switch
-            {
-                "resistor" => Resistor(table, name),
-                "capacitor" => Capacitor(table, name),
-                "inductor" => Two(table, (a, b) => new Inductor(
-                    name, a, b, Value(table, "value", Unit.Henry), table.Quantity("resistance", Unit.Ohm, 0, Most, false) ?? 0,
-                    table.Quantity("q", Unit.None, 0.01, 1e9, false))),
-                "bead" => Two(table, (a, b) => new Bead(
-                    name, a, b, Value(table, "resistance", Unit.Ohm), Value(table, "inductance", Unit.Henry),
-                    table.Quantity("capacitance", Unit.Farad, 0, Most, false) ?? 0)),
-                "supply" => Two(table, (a, b) => new Supply(
-                    name, a, b, table.Quantity("voltage", Unit.Volt, -1000, 1000, true) ?? 0,
-                    table.Quantity("resistance", Unit.Ohm, 0, Most, false) ?? 0)),
-                "antenna" => Two(table, (a, b) => new Antenna(name, a, b)),
-                "bipolar" => Bipolar(table, name, shelf),
-                "feedback" => Feedback(table, name),
-                "windings" => WindingsTable.Read(table, name),
-                _ => null,
-            };
-        }
-        catch (ArgumentException e)
-        {
-            // A figure that is right alone and wrong with the others: the type that refuses it says why.
-            table.Refuse(table.Table.At, $"the part \"{name}\": {WithoutParameter(e.Message)}", "figures that can be built");
-        }
-
+            "resistor" => Resistor(table, name),
+            "capacitor" => Capacitor(table, name),
+            "inductor" => Two(table, (a, b) => new Inductor(
+                name, a, b, Value(table, "value", Unit.Henry), table.Quantity("resistance", Unit.Ohm, 0, MostOf(Unit.Ohm), false) ?? 0,
+                table.Quantity("q", Unit.None, LeastQ, MostQ, false))),
+            "bead" => Two(table, (a, b) => new Bead(
+                name, a, b, Value(table, "resistance", Unit.Ohm), Value(table, "inductance", Unit.Henry),
+                table.Quantity("capacitance", Unit.Farad, 0, MostOf(Unit.Farad), false) ?? 0)),
+            "supply" => Two(table, (a, b) => new Supply(
+                name, a, b, table.Quantity("voltage", Unit.Volt, -1000, 1000, true) ?? 0,
+                table.Quantity("resistance", Unit.Ohm, 0, MostOf(Unit.Ohm), false) ?? 0)),
+            "antenna" => Two(table, (a, b) => new Antenna(name, a, b)),
+            "bipolar" => Bipolar(table, name, source),
+            "feedback" => Feedback(table, name),
+            "windings" => WindingsTable.Read(table, name),
+            _ => null,
+        };
         if (kind is null)
         {
             return null;
@@ -77,30 +68,46 @@ internal static class PartTable
         };
     }
 
+    /// <summary>Whether a text can be the name of a part or node; a fault where it cannot.</summary>
+    public static bool Fits(TableReader table, TomlText name)
+    {
+        if (name.Text.Length is > 0 and <= LongestName)
+        {
+            return true;
+        }
+
+        table.Refuse(name.At, name.Text.Length == 0 ? name.Phrase : $"a name of {name.Text.Length} characters", $"a name of 1 to {LongestName} characters");
+        return false;
+    }
+
     /// <summary>Two node names under a key.</summary>
     public static (string From, string To)? Pair(TableReader table, string key)
     {
         IReadOnlyList<TomlValue> items = table.List(key, required: true, $"{key} = [\"one node\", \"another\"]");
         if (items is [TomlText from, TomlText to])
         {
-            return (from.Text, to.Text);
+            return Fits(table, from) & Fits(table, to) ? (from.Text, to.Text) : null;
         }
 
         if (table.Table.Find(key) is { Value: TomlList list })
         {
-            table.Refuse(list.At, items.Count == 1 ? "one entry" : $"{items.Count} entries", "two node names in quotes");
+            table.Refuse(list.At, items.Count switch { 1 => "one entry", 2 => "a list of other things than texts", int n => $"{n} entries" }, "two node names in quotes");
         }
 
         return null;
     }
 
-    private static string WithoutParameter(string message)
+    private static string? Name(TableReader table, string key, string meaning, bool required)
     {
-        int at = message.IndexOf(" (Parameter", StringComparison.Ordinal);
-        return at > 0 ? message[..at] : message;
+        string? name = table.Text(key, required, meaning);
+        return name is null || Fits(table, (TomlText)table.Table.Find(key)!.Value) ? name : null;
     }
 
-    private static double Value(TableReader table, string key, Unit unit) => table.Quantity(key, unit, Least, Most, true) ?? 1;
+    private static double Value(TableReader table, string key, Unit unit) => table.Quantity(key, unit, LeastOf(unit), MostOf(unit), true) ?? 1;
+
+    private static double LeastOf(Unit unit) => unit == Unit.Ohm ? 1e-6 : 1e-15;
+
+    private static double MostOf(Unit unit) => unit == Unit.Ohm ? 1e12 : 1000;
 
     private static Part? Two(TableReader table, Func<string, string, Part> make) =>
         Pair(table, "between") is { } nodes ? make(nodes.From, nodes.To) : null;
@@ -108,23 +115,23 @@ internal static class PartTable
     private static Part? Resistor(TableReader table, string name)
     {
         bool controlled = table.Table.Find("role")?.Value is TomlText { Text: "regeneration" };
-        double ohm = table.Quantity("value", Unit.Ohm, Least, Most, required: !controlled) ?? 1;
+        double ohm = table.Quantity("value", Unit.Ohm, LeastOf(Unit.Ohm), MostOf(Unit.Ohm), required: !controlled) ?? 1;
         return Two(table, (a, b) => new Resistor(name, a, b, ohm));
     }
 
     private static Part? Capacitor(TableReader table, string name)
     {
         bool tuned = table.Table.Find("role")?.Value is TomlText { Text: "tuning" };
-        double farad = table.Quantity("value", Unit.Farad, Least, Most, required: !tuned) ?? 1e-12;
-        double? q = table.Quantity("q", Unit.None, 0.01, 1e9, required: false);
+        double farad = table.Quantity("value", Unit.Farad, LeastOf(Unit.Farad), MostOf(Unit.Farad), required: !tuned) ?? 1e-12;
+        double? q = table.Quantity("q", Unit.None, LeastQ, MostQ, required: false);
         return Two(table, (a, b) => new Capacitor(name, a, b, farad, q));
     }
 
-    private static Part? Bipolar(TableReader table, string name, DeviceShelf shelf)
+    private static Part? Bipolar(TableReader table, string name, IDeviceSource source)
     {
         TomlValue? device = table.Value("device", required: true, "the name of a device");
         TableReader? nodes = table.Inner("nodes", required: true, "nodes = { base = \"..\", collector = \"..\", emitter = \"..\" }");
-        string? Node(string key) => nodes?.Text(key, required: true, $"the node of the {key}");
+        string? Node(string key) => nodes is null ? null : Name(nodes, key, $"the node of the {key}", required: true);
         (string? basis, string? collector, string? emitter) = (Node("base"), Node("collector"), Node("emitter"));
         nodes?.Finish();
         if (device is not null and not TomlText)
@@ -132,7 +139,7 @@ internal static class PartTable
             table.Refuse(device.At, device.Phrase, "the name of a device in quotes");
         }
 
-        return device is TomlText text && DeviceNames.TryFind(table, shelf, text, out BipolarModel? model)
+        return device is TomlText text && DeviceNames.TryFind(table, source, text, out BipolarModel? model)
             && basis is not null && collector is not null && emitter is not null
             ? new Bipolar(name, basis, collector, emitter, model!)
             : null;

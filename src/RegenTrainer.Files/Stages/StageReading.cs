@@ -16,28 +16,38 @@ internal sealed class StageReading
 
     private const int LongestTitle = 200;
     private const int LongestNote = 5000;
+    private const string PartsKey = "part";
 
-    private readonly string _file;
-    private readonly DeviceShelf _shelf;
+    private readonly IDeviceSource _source;
     private readonly ImmutableSortedDictionary<string, FieldValue>.Builder _values = ImmutableSortedDictionary.CreateBuilder<string, FieldValue>(StringComparer.Ordinal);
     private readonly ImmutableSortedDictionary<string, BipolarModel>.Builder _devices = ImmutableSortedDictionary.CreateBuilder<string, BipolarModel>(StringComparer.Ordinal);
-    private readonly Dictionary<string, TomlPlace> _places = new(StringComparer.Ordinal);
+    private readonly StagePlaces _places = new();
+    private readonly HashSet<string> _wrongTables = new(StringComparer.Ordinal);
+    private readonly HashSet<string> _spoiled = new(StringComparer.Ordinal);
 
-    public StageReading(string file, string text, DeviceShelf shelf)
+    /// <summary>Reads a text.</summary>
+    /// <param name="file">Its name for messages.</param>
+    /// <param name="text">The text.</param>
+    /// <param name="source">Where its devices come from.</param>
+    /// <param name="check">Whether the values are checked against each other, beside each for itself.</param>
+    public StageReading(string file, string text, IDeviceSource source, bool check)
     {
-        (_file, _shelf) = (file, shelf);
+        _source = source;
         Root = TomlReader.TryRead(file, text, Faults);
         if (Root is not null)
         {
-            Design = Read(new TableReader(file, Root, Faults));
+            StageDesign? design = Read(new TableReader(file, Root, Faults), check);
+            Design = Faults.Count == 0 ? design : null;
         }
 
-        Faults.Sort((a, b) => (a.Line, a.Column).CompareTo((b.Line, b.Column)));
+        // The faults of a device's own file stand behind those of the stage.
+        Faults.Sort((a, b) => (a.File != file, a.Line, a.Column).CompareTo((b.File != file, b.Line, b.Column)));
     }
 
     /// <summary>The tables; null where the text is no TOML.</summary>
     public TomlTable? Root { get; }
 
+    /// <summary>What is wrong, by position.</summary>
     public List<FileFault> Faults { get; } = [];
 
     /// <summary>The design; null where there are faults.</summary>
@@ -46,7 +56,10 @@ internal sealed class StageReading
     /// <summary>The entry of each value given, by dotted key.</summary>
     public Dictionary<string, TomlEntry> Entries { get; } = new(StringComparer.Ordinal);
 
-    private StageDesign? Read(TableReader root)
+    /// <summary>The tables of the stage's own parts, by name.</summary>
+    public Dictionary<string, TomlTable> PartTables { get; } = new(StringComparer.Ordinal);
+
+    private StageDesign? Read(TableReader root, bool check)
     {
         if (root.Choice("format", [Format], required: true) is null)
         {
@@ -60,30 +73,40 @@ internal sealed class StageReading
             return null;
         }
 
+        _places.Whole = root.Table.Find("circuit")!.Value.At;
         bool free = ReferenceEquals(family, PartsCircuit.Instance);
+        FieldReader fields = new(root, _source);
         foreach (TomlEntry entry in root.Table.Entries)
         {
-            if (entry.Key is not ("format" or "title" or "note" or "circuit" or "part") && !(free && entry.Key == "output"))
+            if (entry.Key is not ("format" or "title" or "note" or "circuit" or PartsKey) && !(free && entry.Key == "output"))
             {
-                Walk(root, family, entry, entry.Key);
+                Walk(root, fields, family, entry, entry.Key);
             }
         }
 
-        IReadOnlyList<Part> parts = Parts(root);
+        ImmutableArray<Part> parts = Parts(root);
         string? output = free ? Output(root) : null;
         Require(root, family);
-        if (Faults.Count > 0)
+        var design = new StageDesign(family, title, note, _values.ToImmutable(), _devices.ToImmutable(), parts, output);
+        if (check && family.Fields.All(f => !f.Required || _values.ContainsKey(f.Key)))
         {
-            return null;
+            Check(root, design);
         }
 
-        var design = new StageDesign(family, title, note, _values.ToImmutable(), _devices.ToImmutable(), [.. parts], output);
-        foreach (FieldFault fault in family.Check(design))
-        {
-            root.Refuse(PlaceOf(fault.Key), fault.Found, fault.Expected);
-        }
+        return design;
+    }
 
-        return Faults.Count == 0 ? design : null;
+    /// <summary>The faults of the values together, but for those that a value already refused may have brought about.</summary>
+    private void Check(TableReader root, StageDesign design)
+    {
+        foreach (FieldFault fault in design.Family.Check(design))
+        {
+            bool ofParts = fault.Key is PartsKey or "output.node" || fault.Key.StartsWith("part:", StringComparison.Ordinal);
+            if (!_spoiled.Contains(ofParts ? PartsKey : Parent(fault.Key)))
+            {
+                root.Refuse(_places.Of(fault.Key, fault.Found), fault.Found, fault.Expected);
+            }
+        }
     }
 
     private static string Limited(TableReader root, string key, int most, bool required)
@@ -97,175 +120,101 @@ internal sealed class StageReading
         return text;
     }
 
-    private void Walk(TableReader root, Family family, TomlEntry entry, string path)
+    private void Walk(TableReader root, FieldReader fields, Family family, TomlEntry entry, string path)
     {
         if (family.FieldFor(path) is { } field)
         {
-            Take(root, field, entry);
+            Take(fields, field, entry);
         }
-        else if (entry.Value is TomlTable table && family.Fields.Any(f => f.Key.StartsWith(path + ".", StringComparison.Ordinal)))
+        else if (Pieces(family, path) is not { Count: > 0 } below)
         {
-            _places[path] = table.IsInline ? entry.KeyAt : table.At;
+            string parent = Parent(path);
+            IReadOnlyList<string> known = Pieces(family, parent);
+            root.Refuse(
+                entry.KeyAt,
+                $"the unknown key \"{entry.Key}\"",
+                Nearest.Words(entry.Key, parent.Length > 0 ? known : [.. known, "title", "note", "circuit", PartsKey]));
+        }
+        else if (entry.Value is TomlTable table)
+        {
+            _places.Add(path, table.IsInline ? entry.KeyAt : table.At);
             foreach (TomlEntry inner in table.Entries)
             {
-                Walk(root, family, inner, $"{path}.{inner.Key}");
+                Walk(root, fields, family, inner, $"{path}.{inner.Key}");
             }
-        }
-        else if (family.Fields.Any(f => f.Key.StartsWith(path + ".", StringComparison.Ordinal)))
-        {
-            root.Refuse(entry.Value.At, entry.Value.Phrase, $"a table of {path}: {Below(family, path)}");
         }
         else
         {
-            string parent = path.Contains('.', StringComparison.Ordinal) ? path[..path.LastIndexOf('.')] : "";
-            root.Refuse(entry.KeyAt, $"the unknown key \"{entry.Key}\"", Nearest.Words(entry.Key, Pieces(family, parent)));
+            root.Refuse(entry.Value.At, entry.Value.Phrase, $"a table of {path}: {string.Join(", ", below)}");
+            _places.Add(path, entry.Value.At);
+            _spoiled.Add(path);
+            _wrongTables.Add(path);
         }
     }
 
-    /// <summary>The keys that may stand in the table of a path.</summary>
-    private static IEnumerable<string> Pieces(Family family, string parent)
+    private void Take(FieldReader fields, Field field, TomlEntry entry)
     {
-        int skip = parent.Length == 0 ? 0 : parent.Length + 1;
-        return family.Fields.Where(f => parent.Length == 0 || f.Key.StartsWith(parent + ".", StringComparison.Ordinal))
-            .Select(f => f.Key[skip..].Split('.')[0]).Distinct(StringComparer.Ordinal);
-    }
-
-    private static string Below(Family family, string path) => string.Join(", ", Pieces(family, path));
-
-    private void Take(TableReader root, Field field, TomlEntry entry)
-    {
-        _places[field.Key] = entry.Value.At;
+        _places.Add(field.Key, entry.Value.At);
         Entries[field.Key] = entry;
-        switch (field.Kind)
+        if (fields.Read(field, entry.Value, out BipolarModel? model) is { } value)
         {
-            case FieldKind.Quantity:
-                TakeQuantity(root, field, entry);
-                break;
-            case FieldKind.Count:
-                if (root.Whole(entry.Value, (int)field.Minimum, (int)field.Maximum) is { } count)
-                {
-                    _values[field.Key] = FieldValue.Of(count);
-                }
-
-                break;
-            case FieldKind.Choice:
-                if (entry.Value is TomlText word && field.Choices.Contains(word.Text, StringComparer.Ordinal))
-                {
-                    _values[field.Key] = FieldValue.Of(word.Text);
-                }
-                else
-                {
-                    root.Refuse(entry.Value.At, entry.Value.Phrase, TableReader.Words(field.Choices));
-                }
-
-                break;
-            case FieldKind.Device:
-                TakeDevice(root, field, entry.Value);
-                break;
-            default:
-                TakePairs(root, field, entry.Value);
-                break;
-        }
-    }
-
-    private void TakeQuantity(TableReader root, Field field, TomlEntry entry)
-    {
-        TomlValue value = entry.Value;
-        double? tolerance = null;
-        if (value is TomlTable table)
-        {
-            var inner = new TableReader(_file, table, Faults);
-            value = inner.Value("value", required: true, $"value = {QuantityValues.Expected(field.Unit, field.Minimum, field.Maximum)}") ?? value;
-            if (inner.Text("tolerance", required: true, "a tolerance such as \"5%\"") is { } text)
-            {
-                if (Core.Quantities.QuantityText.TryReadTolerance(text, out double percent, out Core.Quantities.QuantityFault fault))
-                {
-                    tolerance = percent;
-                }
-                else
-                {
-                    var at = (TomlText)table.Find("tolerance")!.Value;
-                    root.Refuse(at.PlaceOf(fault.Offset), fault.Found, fault.Expected);
-                }
-            }
-
-            inner.Finish();
-            if (value is TomlTable)
-            {
-                return;
-            }
-        }
-
-        if (QuantityValues.Read(root, value, field.Unit, field.Minimum, field.Maximum) is { } number)
-        {
-            _values[field.Key] = new FieldValue(number, null, tolerance);
-        }
-    }
-
-    private void TakeDevice(TableReader root, Field field, TomlValue value)
-    {
-        if (value is not TomlText text)
-        {
-            root.Refuse(value.At, value.Phrase, "the name of a device in quotes");
-            return;
-        }
-
-        if (DeviceNames.TryFind(root, _shelf, text, out BipolarModel? model))
-        {
-            _values[field.Key] = FieldValue.Of(text.Text);
-            _devices[field.Key] = model!;
-        }
-    }
-
-    private void TakePairs(TableReader root, Field field, TomlValue value)
-    {
-        List<(double, double)> pairs = [];
-        if (value is TomlList list)
-        {
-            foreach (TomlValue item in list.Items)
-            {
-                if (item is TomlList { Items: [TomlNumber first, TomlNumber second] })
-                {
-                    pairs.Add((first.Number, second.Number));
-                }
-                else
-                {
-                    root.Refuse(item.At, item.Phrase, "a pair of numbers [a, b]");
-                }
-            }
-
-            _values[field.Key] = new FieldValue(null, null, null) { Pairs = pairs };
+            _values[field.Key] = value;
         }
         else
         {
-            root.Refuse(value.At, value.Phrase, "a list of pairs [[a, b], ...]");
+            _spoiled.Add(Parent(field.Key));
+        }
+
+        if (model is not null)
+        {
+            _devices[field.Key] = model;
         }
     }
 
-    private IReadOnlyList<Part> Parts(TableReader root)
+    private ImmutableArray<Part> Parts(TableReader root)
     {
-        switch (root.Value("part", required: false, ""))
+        int before = Faults.Count;
+        List<Part> parts = [];
+        switch (root.Value(PartsKey, required: false, ""))
         {
             case TomlTables tables when tables.Tables.Count > PartTable.MostParts:
                 root.Refuse(tables.Tables[PartTable.MostParts].At, $"{tables.Tables.Count} parts", $"at most {PartTable.MostParts}");
-                return [];
+                break;
             case TomlTables tables:
-                List<Part> parts = [];
                 foreach (TomlTable table in tables.Tables)
                 {
-                    if (PartTable.Read(new TableReader(_file, table, Faults), _shelf) is { } part)
+                    if (PartTable.Read(root.Into(table), _source) is { } part)
                     {
                         parts.Add(part);
-                        _places.TryAdd("part:" + part.Name, table.At);
+                        Note(root, part.Name, table);
                     }
                 }
 
-                return parts;
+                break;
             case { } other:
                 root.Refuse(other.At, other.Phrase, "parts under [[part]]");
-                return [];
+                break;
             default:
-                return [];
+                break;
+        }
+
+        if (Faults.Count > before)
+        {
+            _spoiled.Add(PartsKey);
+        }
+
+        return [.. parts];
+    }
+
+    private void Note(TableReader root, string name, TomlTable table)
+    {
+        if (_places.TryAddPart(name, table))
+        {
+            PartTables.Add(name, table);
+        }
+        else
+        {
+            root.Refuse(table.Find("name")!.Value.At, $"a second part named \"{name}\"", "a name of its own for every part");
         }
     }
 
@@ -273,37 +222,47 @@ internal sealed class StageReading
     {
         if (root.Inner("output", required: true, "a table [output] with node = \"..\"") is not { } inner)
         {
+            _spoiled.Add(PartsKey);
             return null;
         }
 
         string? node = inner.Text("node", required: true, "the name of the output node");
-        _places["output.node"] = inner.Table.Find("node")?.Value.At ?? inner.Table.At;
+        if (inner.Table.Find("node") is { } entry)
+        {
+            Entries["output.node"] = entry;
+            _places.Add("output.node", entry.Value.At);
+        }
+
+        if (node is null)
+        {
+            _spoiled.Add(PartsKey);
+        }
+
         inner.Finish();
         return node;
     }
 
     private void Require(TableReader root, Family family)
     {
-        foreach (Field field in family.Fields.Where(f => f.Required && !_places.ContainsKey(f.Key)))
+        foreach (Field field in family.Fields.Where(f => f.Required && !_places.Has(f.Key) && !_wrongTables.Contains(Parent(f.Key))))
         {
             string expected = field.Kind == FieldKind.Quantity
                 ? $"{field.Meaning}, {QuantityValues.Expected(field.Unit, field.Minimum, field.Maximum)}"
                 : field.Meaning;
-            root.Refuse(PlaceOf(field.Key), $"no {field.Key}", expected);
+            root.Refuse(_places.Of(field.Key, ""), $"no {field.Key}", expected);
         }
     }
 
-    /// <summary>Where a key stands; for one that does not, its nearest table.</summary>
-    private TomlPlace PlaceOf(string key)
-    {
-        for (string path = key; path.Length > 0; path = path.Contains('.', StringComparison.Ordinal) ? path[..path.LastIndexOf('.')] : "")
-        {
-            if (_places.TryGetValue(path, out TomlPlace at))
-            {
-                return at;
-            }
-        }
+    private static string Parent(string path) => path.Contains('.', StringComparison.Ordinal) ? path[..path.LastIndexOf('.')] : "";
 
-        return TomlPlace.Start;
+    /// <summary>The keys that may stand in the table of a path; none where it is no table.</summary>
+    private static IReadOnlyList<string> Pieces(Family family, string path)
+    {
+        string start = path.Length == 0 ? "" : path + ".";
+        return
+        [
+            .. family.Fields.Where(f => f.Key.StartsWith(start, StringComparison.Ordinal))
+                .Select(f => f.Key[start.Length..].Split('.')[0]).Distinct(StringComparer.Ordinal),
+        ];
     }
 }

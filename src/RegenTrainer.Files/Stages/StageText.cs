@@ -12,14 +12,16 @@ public static class StageText
     /// <param name="shelf">Where its devices are looked up.</param>
     public static StageReadResult Read(string text, string fileName, DeviceShelf shelf)
     {
-        var reading = new StageReading(fileName, text, shelf);
+        var reading = new StageReading(fileName, text, shelf, check: true);
         return new StageReadResult(reading.Design, reading.Faults);
     }
 
-    /// <summary>Writes a design into a stage file's text: only values that differ from what the text says are changed.</summary>
+    /// <summary>
+    /// Writes a design into a stage file's text: only values, parts and words that differ from what the text says are changed.
+    /// Comments, order and the notation of everything else stay.
+    /// </summary>
     /// <param name="text">A text that reads without faults.</param>
-    /// <param name="design">The design to stand in it: of the same family, with the same parts of its own.</param>
-    /// <param name="shelf">Where the text's devices are looked up.</param>
-    /// <exception cref="ArgumentException">The text has faults, or family, parts or output node differ.</exception>
-    public static string Write(string text, StageDesign design, DeviceShelf shelf) => new StageWriting(text, design, shelf).Text;
+    /// <param name="design">The design to stand in it, of the family the text names.</param>
+    /// <exception cref="ArgumentException">The text has faults, or is of another family.</exception>
+    public static string Write(string text, StageDesign design) => StageWriting.Write(text, design);
 }

@@ -1,186 +1,95 @@
-using System.Globalization;
 using RegenTrainer.Core.Stages;
 using RegenTrainer.Files.Devices;
 using RegenTrainer.Files.Toml;
 
 namespace RegenTrainer.Files.Stages;
 
-/// <summary>One writing of a design into a stage file's text: collects changes by place, then applies them from the end.</summary>
-internal sealed class StageWriting
+/// <summary>
+/// Writes a design into a stage file's text in two steps: what is there is changed or taken out, and what is missing is put
+/// in where the changed text has room for it.
+/// </summary>
+internal static class StageWriting
 {
-    private readonly string _text;
-    private readonly StageReading _reading;
-    private readonly List<(int Offset, int Length, string Insert)> _changes = [];
-    private readonly Dictionary<string, List<string>> _newTables = new(StringComparer.Ordinal);
-
-    public StageWriting(string text, StageDesign design, DeviceShelf shelf)
-    {
-        _text = text;
-        _reading = new StageReading("stage", text, shelf);
-        StageDesign old = _reading.Design ?? throw new ArgumentException($"the text has faults: {_reading.Faults[0]}", nameof(text));
-        if (!ReferenceEquals(old.Family, design.Family) || old.OutputNode != design.OutputNode || !old.ExtraParts.SequenceEqual(design.ExtraParts, PartComparer.Instance))
-        {
-            throw new ArgumentException("a text takes values; its family, parts and output node stay as they are", nameof(design));
-        }
-
-        WriteWord("title", old.Title, design.Title);
-        WriteWord("note", old.Note, design.Note);
-        foreach (Field field in design.Family.Fields)
-        {
-            WriteField(field, old.Values.GetValueOrDefault(field.Key), design.Values.GetValueOrDefault(field.Key));
-        }
-
-        Text = Apply();
-    }
+    private const string Name = "stage";
 
     /// <summary>The text with the design in it.</summary>
-    public string Text { get; }
-
-    private string NewLine => _text.Contains("\r\n", StringComparison.Ordinal) ? "\r\n" : "\n";
-
-    private void WriteWord(string key, string old, string now)
+    public static string Write(string text, StageDesign design)
     {
-        if (old == now)
+        var source = new DesignDevices(design);
+        StageReading reading = new(Name, text, source, check: false);
+        StageDesign old = reading.Design ?? throw new ArgumentException($"the text has faults: {reading.Faults[0]}", nameof(text));
+        if (!ReferenceEquals(old.Family, design.Family))
         {
-            return;
+            throw new ArgumentException($"the text is of the family {old.Family.Name}, not {design.Family.Name}", nameof(design));
         }
 
-        if (_reading.Root!.Find(key) is { } entry)
-        {
-            Replace(entry.Value.Span, Notation.Quoted(now));
-        }
-        else
-        {
-            // Behind the title, which every stage has.
-            Insert(EndOfLine(_reading.Root.Find("title")!.Line.End), $"{key} = {Notation.Quoted(now)}{NewLine}");
-        }
+        string changed = Change(text, reading, old, design);
+        return Add(changed, new StageReading(Name, changed, source, check: false), old, design);
     }
 
-    private void WriteField(Field field, FieldValue? old, FieldValue? now)
+    private static string Change(string text, StageReading reading, StageDesign old, StageDesign design)
     {
-        if (Same(old, now))
+        var edits = new TextEdits(text);
+        ChangeWord(edits, reading.Root!.Find("title"), old.Title, design.Title);
+        ChangeWord(edits, reading.Root.Find("note"), old.Note, design.Note);
+        ChangeWord(edits, reading.Entries.GetValueOrDefault("output.node"), old.OutputNode ?? "", design.OutputNode ?? "");
+        List<string> gone = [];
+        foreach (Field field in design.Family.Fields.Where(f => reading.Entries.ContainsKey(f.Key)))
         {
-            return;
-        }
-
-        if (now is null)
-        {
-            Remove(_reading.Entries[field.Key], field.Key);
-        }
-        else if (_reading.Entries.TryGetValue(field.Key, out TomlEntry? entry))
-        {
-            bool onlyNumber = entry.Value is TomlTable && now.TolerancePercent == old!.TolerancePercent;
-            TomlValue target = onlyNumber ? ((TomlTable)entry.Value).Find("value")!.Value : entry.Value;
-            Replace(target.Span, onlyNumber ? Plain(field, now, target) : Written(field, now, target));
-        }
-        else
-        {
-            Add(field.Key, Written(field, now, null));
-        }
-    }
-
-    private static bool Same(FieldValue? a, FieldValue? b) =>
-        a is null || b is null
-            ? a is null && b is null
-            : a.Number == b.Number && a.Text == b.Text && a.TolerancePercent == b.TolerancePercent && a.Pairs.SequenceEqual(b.Pairs);
-
-    private static string Written(Field field, FieldValue value, TomlValue? old)
-    {
-        string plain = Plain(field, value, old is TomlTable table ? table.Find("value")?.Value : old);
-        return value.TolerancePercent is { } tolerance
-            ? $"{{ value = {plain}, tolerance = \"{tolerance.ToString("R", CultureInfo.InvariantCulture)}%\" }}"
-            : plain;
-    }
-
-    private static string Plain(Field field, FieldValue value, TomlValue? old) => field.Kind switch
-    {
-        FieldKind.Quantity => old is TomlNumber ? Notation.Number(value.Number!.Value) : Notation.Trade(value.Number!.Value, field.Unit, (old as TomlText)?.Text),
-        FieldKind.Count => ((int)value.Number!.Value).ToString(CultureInfo.InvariantCulture),
-        FieldKind.Pairs => "[" + string.Join(", ", value.Pairs.Select(p => $"[{Notation.Number(p.First)}, {Notation.Number(p.Second)}]")) + "]",
-        _ => Notation.Quoted(value.Text!),
-    };
-
-    private void Replace(TomlSpan span, string now) => _changes.Add((span.Offset, span.Length, now));
-
-    private void Insert(int offset, string text) => _changes.Add((offset, 0, text));
-
-    /// <summary>Puts a value into the innermost table of its path that stands in the text, or into a table behind everything.</summary>
-    private void Add(string key, string value)
-    {
-        TomlTable table = _reading.Root!;
-        int used = 0;
-        string[] pieces = key.Split('.');
-        while (used < pieces.Length - 1 && table.Find(pieces[used]) is { Value: TomlTable inner })
-        {
-            (table, used) = (inner, used + 1);
-        }
-
-        string rest = string.Join('.', pieces[used..]);
-        if (used == 0)
-        {
-            if (!_newTables.TryGetValue(pieces[0], out List<string>? lines))
+            TomlEntry entry = reading.Entries[field.Key];
+            FieldValue was = old.Values[field.Key];
+            if (Wanted(design, field) is not { } now)
             {
-                _newTables.Add(pieces[0], lines = []);
+                gone.Add(field.Key);
             }
+            else if (!ValueNotation.Same(was, now))
+            {
+                ValueNotation.Change(edits, text, field, entry.Value, was, now);
+            }
+        }
 
-            lines.Add($"{string.Join('.', pieces[1..])} = {value}");
-        }
-        else if (table.IsInline)
-        {
-            int end = table.Entries.Count > 0 ? table.Entries[^1].Line.End : table.Span.Offset + 1;
-            Insert(end, table.Entries.Count > 0 ? $", {rest} = {value}" : $" {rest} = {value} ");
-        }
-        else
-        {
-            int last = table.Entries.Count > 0 ? table.Entries.Max(e => e.Line.End) : table.Span.End;
-            int end = EndOfLine(last);
-            Insert(end, (end > 0 && _text[end - 1] != '\n' ? NewLine : "") + $"{rest} = {value}{NewLine}");
-        }
+        Removal.Remove(edits, reading.Root, gone);
+        PartWriting.Change(edits, reading, old, design);
+        return edits.Apply();
     }
 
-    private void Remove(TomlEntry entry, string key)
+    private static string Add(string text, StageReading reading, StageDesign old, StageDesign design)
     {
-        TomlTable table = _reading.Root!;
-        foreach (string piece in key.Split('.')[..^1])
+        var edits = new TextEdits(text);
+        TomlTable root = reading.Root!;
+        if (old.Note != design.Note && root.Find("note") is null)
         {
-            table = table.Find(piece)?.Value as TomlTable ?? table;
+            edits.InsertLineBehind(root.Body!.Value.End, $"note = {Notation.Quoted(design.Note)}");
         }
 
-        if (!table.IsInline)
+        var addition = new Addition(edits, text, root);
+        foreach (Field field in design.Family.Fields.Where(f => !reading.Entries.ContainsKey(f.Key)))
         {
-            int start = _text.LastIndexOf('\n', Math.Max(0, entry.Line.Offset - 1)) + 1;
-            _changes.Add((start, EndOfLine(entry.Line.End) - start, ""));
-            return;
+            if (Wanted(design, field) is { } value)
+            {
+                addition.Add(field.Key, ValueNotation.Of(field, value));
+            }
         }
 
-        // With the comma that parts it from a neighbour.
-        int at = table.Entries.IndexOf(entry);
-        (int from, int to) = at + 1 < table.Entries.Count
-            ? (entry.Line.Offset, table.Entries[at + 1].Line.Offset)
-            : at > 0 ? (table.Entries[at - 1].Line.End, entry.Line.End) : (entry.Line.Offset, entry.Line.End);
-        _changes.Add((from, to - from, ""));
+        addition.AddTables();
+        PartWriting.Add(edits, text, reading, design);
+        return edits.Apply();
     }
 
-    private int EndOfLine(int offset)
+    /// <summary>The value a design wants written: for a socket the device in it, under the name the design's values give it.</summary>
+    private static FieldValue? Wanted(StageDesign design, Field field)
     {
-        int end = _text.IndexOf('\n', Math.Min(offset, _text.Length));
-        return end < 0 ? _text.Length : end + 1;
+        FieldValue? value = design.Values.GetValueOrDefault(field.Key);
+        bool other = field.Kind == FieldKind.Device && design.Devices.TryGetValue(field.Key, out Core.Devices.BipolarModel? model)
+            && !string.Equals(model.Name, value?.Text, StringComparison.OrdinalIgnoreCase);
+        return other ? FieldValue.Of(design.Devices[field.Key].Name) : value;
     }
 
-    private string Apply()
+    private static void ChangeWord(TextEdits edits, TomlEntry? entry, string old, string now)
     {
-        string result = _text;
-        foreach ((int offset, int length, string insert) in _changes.AsEnumerable().Reverse().OrderByDescending(c => c.Offset))
+        if (entry is not null && old != now)
         {
-            result = string.Concat(result.AsSpan(0, offset), insert, result.AsSpan(offset + length));
+            edits.Replace(entry.Value.Span, Notation.Quoted(now));
         }
-
-        foreach ((string table, List<string> lines) in _newTables)
-        {
-            string gap = result.Length == 0 || result.EndsWith('\n') ? "" : NewLine;
-            result += $"{gap}{NewLine}[{table}]{NewLine}{string.Concat(lines.Select(l => l + NewLine))}";
-        }
-
-        return result;
     }
 }

@@ -5,17 +5,23 @@ using RegenTrainer.Files.Toml;
 
 namespace RegenTrainer.Files.Stages;
 
-/// <summary>Reads windings, by geometry or by inductance and coupling.</summary>
+/// <summary>Reads windings by their geometry: one winding, or several on one axis.</summary>
 internal static class WindingsTable
 {
-    public static Part? Read(TableReader table, string name) => table.Has("sections") ? BySections(table, name) : ByGeometry(table, name);
+    private const int MostWindings = 16;
+    private const double LeastLength = 1e-6;
+    private const double MostRadius = 10;
+
+    // As the winding itself takes it: a pitch worked out from the wire's diameter may differ from it by rounding.
+    private const double PitchSlack = 1e-9;
+
+    /// <summary>The part; null with its faults noted.</summary>
+    public static Part? Read(TableReader table, string name) => table.Has("sections") ? SectionsTable.Read(table, name) : ByGeometry(table, name);
 
     private static Part? ByGeometry(TableReader table, string name)
     {
         int before = table.Faults.Count;
-        double? form = table.Quantity("form_diameter", Unit.Metre, 1e-4, 10, required: !table.Has("radius"));
-        double? radius = table.Quantity("radius", Unit.Metre, 1e-4, 10, required: false);
-        double? formLoss = table.Quantity("form_loss_q", Unit.None, 1, 1e9, required: false);
+        double? formLoss = table.Quantity("form_loss_q", Unit.None, 1, 1e6, required: false);
         (double, double)? measured = null;
         if (table.Inner("q", required: false, "q = { value = .., at = .. }") is { } q)
         {
@@ -23,16 +29,24 @@ internal static class WindingsTable
             q.Finish();
         }
 
-        Wire? wire = Wire(table, null);
+        Turns first = new(Form(table), Radius(table), Wire(table, null));
         List<Winding> windings = [];
         List<(string, string)> nodes = [];
-        Add(table, form, radius, wire, windings, nodes);
-        foreach (TomlValue item in table.List("winding", required: false, "a list of windings { turns = .., nodes = [..], start = .. }"))
+        Add(table, first, windings, nodes);
+        IReadOnlyList<TomlValue> more = table.List("winding", required: false, "a list of windings { turns = .., nodes = [..], start = .. }");
+        if (more.Count >= MostWindings)
+        {
+            table.Refuse(more[MostWindings - 1].At, $"{more.Count + 1} windings", $"at most {MostWindings}");
+            return null;
+        }
+
+        foreach (TomlValue item in more)
         {
             if (item is TomlTable inner)
             {
-                var reader = new TableReader(table.File, inner, table.Faults);
-                Add(reader, form, reader.Quantity("radius", Unit.Metre, 1e-4, 10, required: false) ?? radius, Wire(reader, wire), windings, nodes);
+                TableReader reader = table.Into(inner);
+                double? radius = Radius(reader);
+                Add(reader, new Turns(radius is null ? first.Form : null, radius ?? first.Radius, Wire(reader, first.Wire)), windings, nodes);
                 reader.Finish();
             }
             else
@@ -41,98 +55,147 @@ internal static class WindingsTable
             }
         }
 
-        return table.Faults.Count > before ? null : new Windings(name, nodes, new Coil(windings, formLoss, measured));
+        if (table.Faults.Count > before)
+        {
+            return null;
+        }
+
+        try
+        {
+            return new Windings(name, nodes, new Coil(windings, formLoss, measured));
+        }
+        catch (ArgumentException)
+        {
+            // Every value is within its range: what the coil still refuses is turns in one place.
+            table.Refuse(more.Count > 0 ? more[0].At : table.Table.At, "two windings with turns in the same place", "windings beside or around each other");
+            return null;
+        }
     }
+
+    private static double? Form(TableReader table)
+    {
+        double? form = table.Quantity("form_diameter", Unit.Metre, 1e-4, 2 * MostRadius, required: !table.Has("radius"));
+        if (form is not null && table.Table.Find("radius") is { } radius)
+        {
+            table.Refuse(radius.KeyAt, "a radius beside a form diameter", "one of the two");
+        }
+
+        return form;
+    }
+
+    private static double? Radius(TableReader table) => table.Quantity("radius", Unit.Metre, LeastLength, MostRadius, required: false);
 
     private static Wire? Wire(TableReader table, Wire? inherited)
     {
-        double? bare = table.Quantity("wire_diameter", Unit.Metre, 1e-6, 0.1, required: inherited is null);
-        double? over = table.Quantity("wire_over_insulation", Unit.Metre, 1e-6, 0.2, required: false);
-        return bare is { } diameter ? new Wire(diameter, over) : inherited;
+        double? bare = table.Quantity("wire_diameter", Unit.Metre, LeastLength, 0.02, required: inherited is null);
+        double? over = table.Quantity("wire_over_insulation", Unit.Metre, LeastLength, 0.1, required: false);
+        if ((bare ?? inherited?.BareDiameterMetre) is not { } diameter)
+        {
+            return null;
+        }
+
+        if (over < diameter)
+        {
+            TomlValue there = table.Table.Find("wire_over_insulation")!.Value;
+            table.Refuse(there.At, there.Phrase, $"at least {QuantityText.Write(diameter, Unit.Metre)}, the bare copper");
+            return null;
+        }
+
+        return bare is null && over is null ? inherited : new Wire(diameter, over);
     }
 
-    private static void Add(
-        TableReader table, double? form, double? radius, Wire? wire, List<Winding> windings, List<(string From, string To)> nodes)
+    private static void Add(TableReader table, Turns laid, List<Winding> windings, List<(string From, string To)> nodes)
     {
         int before = table.Faults.Count;
         int? turns = table.Count("turns", 1, Winding.MostTurns, required: true);
-        double? pitch = table.Quantity("pitch", Unit.Metre, 1e-6, 1, required: false);
+        double? pitch = Pitch(table, laid.Wire);
         double start = table.Quantity("start", Unit.Metre, -10, 10, required: false) ?? 0;
-        List<int> taps = [];
-        foreach (TomlValue item in table.List("taps", required: false, "a list of turn numbers"))
+        List<int> taps = turns is { } all ? Taps(table, all) : [];
+        IReadOnlyList<string> names = Nodes(table);
+        if (table.Faults.Count == before && names.Count != taps.Count + 2)
         {
-            if (turns is { } all && all > 1 && table.Whole(item, 1, all - 1) is { } tap)
-            {
-                taps.Add(tap);
-            }
+            table.Refuse(table.Table.Find("nodes")!.Value.At, $"{names.Count} nodes", $"{taps.Count + 2}: start, taps in order, end");
         }
 
-        if (taps.Count > Winding.MostTaps)
+        if (laid is { Wire: { } own, Radius: { } given } && given < 0.5 * own.OverInsulationMetre)
         {
-            table.Refuse(table.Table.At, $"{taps.Count} taps", $"at most {Winding.MostTaps}");
+            table.Refuse(table.Table.Find("radius")?.Value.At ?? table.Table.At, QuantityText.Write(given, Unit.Metre), "at least half the wire over its insulation");
         }
 
-        string[] names = [.. table.List("nodes", required: true, "a list of nodes: start, taps in order, end").OfType<TomlText>().Select(t => t.Text)];
-        if (table.Faults.Count == before && names.Length != taps.Count + 2)
-        {
-            table.Refuse(table.Table.Find("nodes")?.Value.At ?? table.Table.At, $"{names.Length} nodes", $"{taps.Count + 2}: start, taps in order, end");
-        }
-
-        if (table.Faults.Count > before || wire is null || (form is null && radius is null))
+        if (table.Faults.Count > before || laid.Wire is not { } wire || (laid.Form is null && laid.Radius is null))
         {
             return;
         }
 
-        double spacing = pitch ?? wire.OverInsulationMetre;
-        windings.Add(radius is { } r
-            ? new Winding(r, turns!.Value, spacing, wire, taps, start)
-            : Winding.OnForm(form!.Value, wire, turns!.Value, pitch, taps, start));
-        for (int k = 1; k < names.Length; k++)
+        windings.Add(laid.Radius is { } radius
+            ? new Winding(radius, turns!.Value, pitch ?? wire.OverInsulationMetre, wire, taps, start)
+            : Winding.OnForm(laid.Form!.Value, wire, turns!.Value, pitch, taps, start));
+        for (int k = 1; k < names.Count; k++)
         {
             nodes.Add((names[k - 1], names[k]));
         }
     }
 
-    private static Part? BySections(TableReader table, string name)
+    private static double? Pitch(TableReader table, Wire? wire)
     {
-        int before = table.Faults.Count;
-        List<InductiveSection> sections = [];
-        List<(string, string)> nodes = [];
-        foreach (TomlValue item in table.List("sections", required: true, "a list of sections { between = [..], inductance = .. }"))
+        double? pitch = table.Quantity("pitch", Unit.Metre, LeastLength, 1, required: false);
+        if (pitch < wire?.OverInsulationMetre * (1 - PitchSlack))
         {
-            if (item is not TomlTable inner)
-            {
-                table.Refuse(item.At, item.Phrase, "a section { between = [..], inductance = .. }");
-                continue;
-            }
-
-            var reader = new TableReader(table.File, inner, table.Faults);
-            (string From, string To)? between = PartTable.Pair(reader, "between");
-            double? henry = reader.Quantity("inductance", Unit.Henry, 1e-12, 1e3, required: true);
-            double? q = reader.Quantity("q", Unit.None, 0.1, 1e9, required: false);
-            double ohm = reader.Quantity("resistance", Unit.Ohm, 0, 1e9, required: false) ?? 0;
-            reader.Finish();
-            if (between is { } ends && henry is { } value)
-            {
-                sections.Add(new InductiveSection(value, q, ohm));
-                nodes.Add(ends);
-            }
+            TomlValue there = table.Table.Find("pitch")!.Value;
+            table.Refuse(there.At, there.Phrase, $"at least {QuantityText.Write(wire!.OverInsulationMetre, Unit.Metre)}, the wire over its insulation");
         }
 
-        List<SectionCoupling> couplings = [];
-        foreach (TomlValue item in table.List("coupling", required: false, "a list of couplings [first, second, factor]"))
-        {
-            if (item is TomlList { Items: [TomlNumber first, TomlNumber second, TomlNumber factor] }
-                && table.Whole(first, 1, sections.Count) is { } i && table.Whole(second, 1, sections.Count) is { } j)
-            {
-                couplings.Add(new SectionCoupling(i - 1, j - 1, factor.Number));
-            }
-            else
-            {
-                table.Refuse(item.At, item.Phrase, $"[section, section, factor] with sections 1 to {sections.Count}");
-            }
-        }
-
-        return table.Faults.Count > before ? null : new Windings(name, nodes, new CoupledSections(sections, couplings));
+        return pitch;
     }
+
+    private static List<int> Taps(TableReader table, int turns)
+    {
+        List<int> taps = [];
+        IReadOnlyList<TomlValue> items = table.List("taps", required: false, "a list of turns, counted from the start");
+        if (items.Count > Winding.MostTaps)
+        {
+            table.Refuse(items[Winding.MostTaps].At, $"{items.Count} taps", $"at most {Winding.MostTaps}");
+            return [];
+        }
+
+        foreach (TomlValue item in items)
+        {
+            if (turns < 2)
+            {
+                table.Refuse(item.At, "a tap on a single turn", "a winding of at least 2 turns");
+            }
+            else if (table.Whole(item, 1, turns - 1) is { } tap)
+            {
+                if (taps.Count > 0 && tap <= taps[^1])
+                {
+                    table.Refuse(item.At, $"a tap at {tap} behind one at {taps[^1]}", "taps in rising order");
+                }
+
+                taps.Add(tap);
+            }
+        }
+
+        return taps;
+    }
+
+    private static List<string> Nodes(TableReader table)
+    {
+        List<string> names = [];
+        foreach (TomlValue item in table.List("nodes", required: true, "a list of nodes: start, taps in order, end"))
+        {
+            if (item is not TomlText text)
+            {
+                table.Refuse(item.At, item.Phrase, "the name of a node in quotes");
+            }
+            else if (PartTable.Fits(table, text))
+            {
+                names.Add(text.Text);
+            }
+        }
+
+        return names;
+    }
+
+    /// <summary>What turns are laid on and of which wire: a form, or a radius to the wire's centre.</summary>
+    private sealed record Turns(double? Form, double? Radius, Wire? Wire);
 }

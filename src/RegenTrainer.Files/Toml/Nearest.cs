@@ -4,10 +4,14 @@ namespace RegenTrainer.Files.Toml;
 internal static class Nearest
 {
     private const int MostWords = 4;
+    private const int Slip = 2;
 
     public static string Words(string typed, IEnumerable<string> known)
     {
-        string[] nearest = [.. known.OrderBy(k => Distance(typed, k)).ThenBy(k => k, StringComparer.Ordinal).Take(MostWords)];
+        (string Word, int Distance)[] all = [.. known.Select(k => (k, Distance(typed, k))).OrderBy(k => k.Item2).ThenBy(k => k.k, StringComparer.Ordinal)];
+
+        // A word that is nearly right names what was meant; the others would only hide it.
+        string[] nearest = [.. all.TakeWhile(k => k.Distance <= Math.Max(Slip, all[0].Distance + 1)).Take(MostWords).Select(k => k.Word)];
         return nearest.Length == 0 ? "no key here" : TableReader.Words(nearest);
     }
 

@@ -31,13 +31,7 @@ internal static class Notation
     }
 
     /// <summary>A plain number that reads back to the last bit.</summary>
-    public static string Number(double value)
-    {
-        string text = value.ToString("R", CultureInfo.InvariantCulture);
-        return text.AsSpan().IndexOfAny("eE.") < 0 || text.Contains('.', StringComparison.Ordinal)
-            ? text
-            : text.Replace("E", ".0E", StringComparison.Ordinal);   // TOML wants no bare "1E-12" misread as a word by old readers
-    }
+    public static string Number(double value) => value.ToString("R", CultureInfo.InvariantCulture);
 
     /// <summary>
     /// A quantity in quotes as the trade writes it, with as few figures as read back to the same number; without a letter
@@ -51,9 +45,11 @@ internal static class Notation
             return Quoted(Number(value));
         }
 
+        // A text with a gap has its unit spelled out: 0.4 mm, 530 kHz.
+        bool spelled = replaced is not null && replaced.Trim().Contains(' ', StringComparison.Ordinal);
         for (int figures = 3; figures <= MostFigures; figures++)
         {
-            string code = QuantityText.WriteCode(value, unit, figures);
+            string code = spelled ? QuantityText.Write(value, unit, figures) : QuantityText.WriteCode(value, unit, figures);
             if (QuantityText.TryRead(code, unit, out double back, out _) && back == value)
             {
                 return Quoted(code);

@@ -13,6 +13,9 @@ internal sealed class TableReader(string file, TomlTable table, List<FileFault> 
 
     public List<FileFault> Faults => faults;
 
+    /// <summary>A reader of another table of the same file.</summary>
+    public TableReader Into(TomlTable inner) => new(file, inner, faults);
+
     public bool Has(string key) => table.Find(key) is not null;
 
     public void Refuse(TomlPlace at, string found, string expected) => faults.Add(new FileFault(file, at.Line, at.Column, found, expected));
@@ -91,7 +94,7 @@ internal sealed class TableReader(string file, TomlTable table, List<FileFault> 
             case null:
                 return null;
             case TomlTable inner:
-                return new TableReader(file, inner, faults);
+                return Into(inner);
             case { } other:
                 Refuse(other.At, other.Phrase, meaning);
                 return null;
@@ -107,6 +110,8 @@ internal sealed class TableReader(string file, TomlTable table, List<FileFault> 
                 return [];
             case TomlList list:
                 return list.Items;
+            case TomlTables tables:
+                return tables.Tables;
             case { } other:
                 Refuse(other.At, other.Phrase, meaning);
                 return [];

@@ -1,3 +1,4 @@
+using System.Text;
 using Tomlyn.Parsing;
 using Tomlyn.Syntax;
 
@@ -6,8 +7,8 @@ namespace RegenTrainer.Files.Toml;
 /// <summary>Reads TOML into tables whose every key and value knows its place, with the limits of our files.</summary>
 internal sealed class TomlReader
 {
-    /// <summary>Largest file in characters.</summary>
-    public const int MostCharacters = 1_000_000;
+    /// <summary>Largest file in bytes of UTF-8.</summary>
+    public const int MostBytes = 1_000_000;
 
     private const int MostLines = 20_000;
     private const int DeepestNesting = 32;
@@ -28,9 +29,9 @@ internal sealed class TomlReader
     /// <summary>Checks size, lines and nesting on the bare characters, before anything is built of them.</summary>
     private bool WithinLimits()
     {
-        if (_text.Length > MostCharacters)
+        if (_text.Length > MostBytes || Encoding.UTF8.GetByteCount(_text) > MostBytes)
         {
-            return Refuse(TomlPlace.Start, $"a file of {_text.Length} characters", "at most 1 MB");
+            return Refuse(TomlPlace.Start, "a file of more than 1 MB", "at most 1 MB");
         }
 
         var scan = new BracketScan(_text);
@@ -63,21 +64,20 @@ internal sealed class TomlReader
 
     private TomlTable? Read()
     {
-        DocumentSyntax document = SyntaxParser.Parse(_text, _file);
+        // Keys and tables given twice are found below, all of them, beside what else is wrong.
+        DocumentSyntax document = SyntaxParser.Parse(_text, _file, validate: false);
         if (document.HasErrors)
         {
+            // What follows the first fault is mostly its echo.
             DiagnosticMessage first = document.Diagnostics.First(d => d.Kind == DiagnosticMessageKind.Error);
-            TomlPlace at = Place(first.Span);
-            bool twice = first.Message.Contains("already", StringComparison.Ordinal);
-            Refuse(
-                at,
-                twice ? "a key or table a second time" : Offending(first.Span),
-                twice ? "each key and table once" : "key = value, [table] or # comment");
+            (int offset, string found, string expected) = SyntaxWording.Of(_text, first.Span.Start.Offset, first.Message);
+            Refuse(PlaceAt(offset), found, expected);
             return null;
         }
 
         var root = new TomlTable(TomlPlace.Start, default);
         Fill(root, document.KeyValues, 0);
+        root.Body = new TomlSpan(0, EndOf(document.KeyValues) ?? 0);
         foreach (TableSyntaxBase table in document.Tables)
         {
             if (table.Name is not { } name || Open(root, name, table is TableArraySyntax) is not { } target)
@@ -86,21 +86,11 @@ internal sealed class TomlReader
             }
 
             Fill(target, table.Items, 0);
+            int start = table.Span.Start.Offset;
+            target.Body = new TomlSpan(start, (EndOf(table.Items) ?? name.Span.End.Offset + 1) - start);
         }
 
         return root;
-    }
-
-    private string Offending(SourceSpan span)
-    {
-        int offset = span.Start.Offset;
-        if (offset >= _text.Length)
-        {
-            return "the end of the file";
-        }
-
-        char c = _text[offset];
-        return c is '\n' or '\r' ? "the end of the line" : $"'{c}'";
     }
 
     private TomlTable? Open(TomlTable root, KeySyntax name, bool repeated)
@@ -134,14 +124,14 @@ internal sealed class TomlReader
 
                 table = tables.Tables[^1];
             }
-            else if (entry.Value is TomlTable { IsInline: false } there && (!last || (there.IsImplied && !repeated)))
+            else if (entry.Value is TomlTable { IsInline: false } there && (!last || (there.IsImplied && !there.IsDotted && !repeated)))
             {
                 there.IsImplied = there.IsImplied && !last;
                 table = there;
             }
             else
             {
-                Refuse(at, $"\"{key}\" a second time", "each table and key once");
+                Twice(at, entry);
                 return null;
             }
         }
@@ -165,33 +155,46 @@ internal sealed class TomlReader
                 continue;
             }
 
+            bool clash = false;
             TomlTable target = table;
             for (int k = 0; k < path.Count - 1; k++)
             {
                 if (target.Find(path[k].Key) is not { } entry)
                 {
-                    var made = new TomlTable(path[k].At, Span(key.Span)) { IsImplied = true };
+                    var made = new TomlTable(path[k].At, Span(key.Span)) { IsImplied = true, IsDotted = true };
                     target.TryAdd(new TomlEntry(path[k].Key, path[k].At, made, Span(item.Span)));
                     target = made;
                 }
-                else if (entry.Value is TomlTable there)
+                else if (entry.Value is TomlTable { IsInline: false } there)
                 {
                     target = there;
                 }
                 else
                 {
-                    Refuse(path[k].At, $"\"{path[k].Key}\" a second time", "each table and key once");
-                    return;
+                    Twice(path[k].At, entry);
+                    clash = true;
+                    break;
                 }
+            }
+
+            if (clash)
+            {
+                continue;
             }
 
             var line = new TomlSpan(key.Span.Start.Offset, value.Span.End.Offset + 1 - key.Span.Start.Offset);
             if (!target.TryAdd(new TomlEntry(path[^1].Key, path[^1].At, Value(value, depth + 1), line)))
             {
-                Refuse(path[^1].At, $"\"{path[^1].Key}\" a second time", "each table and key once");
+                Twice(path[^1].At, target.Find(path[^1].Key)!);
             }
         }
     }
+
+    private void Twice(TomlPlace at, TomlEntry first) =>
+        Refuse(at, $"\"{first.Key}\" a second time", $"each key and table once; the first is in line {first.KeyAt.Line}");
+
+    private static int? EndOf(IEnumerable<KeyValueSyntax> items) =>
+        items.LastOrDefault(i => i.Value is not null) is { } last ? last.Value!.Span.End.Offset + 1 : null;
 
     private TomlValue Value(ValueSyntax value, int depth)
     {
@@ -199,8 +202,7 @@ internal sealed class TomlReader
         switch (value)
         {
             case StringValueSyntax s:
-                string text = s.Value ?? "";
-                return new TomlText(at, span, text, string.CompareOrdinal(_text, span.Offset + 1, text, 0, text.Length) == 0);
+                return new TomlText(at, span, s.Value ?? "", _text.Substring(span.Offset, span.Length));
             case IntegerValueSyntax i:
                 return new TomlNumber(at, span, i.Value, true, Written(span));
             case FloatValueSyntax f when double.IsFinite(f.Value):
@@ -235,6 +237,12 @@ internal sealed class TomlReader
     };
 
     private string Written(TomlSpan span) => _text.Substring(span.Offset, Math.Min(span.Length, 40));
+
+    private TomlPlace PlaceAt(int offset)
+    {
+        ReadOnlySpan<char> before = _text.AsSpan(0, offset);
+        return new TomlPlace(before.Count('\n') + 1, offset - before.LastIndexOf('\n'));
+    }
 
     private static TomlPlace Place(SourceSpan span) => new(span.Start.Line + 1, span.Start.Column + 1);
 

@@ -7,8 +7,8 @@ internal abstract record TomlValue(TomlPlace At, TomlSpan Span)
     public abstract string Phrase { get; }
 }
 
-/// <summary>A string. <paramref name="Verbatim"/> says that no escapes shift its characters against the text.</summary>
-internal sealed record TomlText(TomlPlace At, TomlSpan Span, string Text, bool Verbatim) : TomlValue(At, Span)
+/// <summary>A string: its value, and how it is written with quotes and escapes.</summary>
+internal sealed record TomlText(TomlPlace At, TomlSpan Span, string Text, string Written) : TomlValue(At, Span)
 {
     private const int LongestQuote = 40;
 
@@ -16,7 +16,14 @@ internal sealed record TomlText(TomlPlace At, TomlSpan Span, string Text, bool V
         : Text.Length <= LongestQuote ? $"\"{Text}\"" : $"\"{Text[..LongestQuote]}...\"";
 
     /// <summary>The place of a character of the string.</summary>
-    public TomlPlace PlaceOf(int offset) => Verbatim ? At with { Column = At.Column + 1 + offset } : At;
+    public TomlPlace PlaceOf(int offset)
+    {
+        ReadOnlySpan<char> before = Written.AsSpan(0, QuotedText.OffsetOf(Written, offset));
+        int lines = before.Count('\n');
+        return lines == 0
+            ? At with { Column = At.Column + before.Length }
+            : new TomlPlace(At.Line + lines, before.Length - before.LastIndexOf('\n'));
+    }
 }
 
 /// <summary>A number.</summary>
@@ -50,6 +57,12 @@ internal sealed record TomlTable(TomlPlace At, TomlSpan Span) : TomlValue(At, Sp
 
     /// <summary>Whether it came about by dots in a key or header only.</summary>
     public bool IsImplied { get; set; }
+
+    /// <summary>Whether it came about by dots in a key, so that no header of its own may follow.</summary>
+    public bool IsDotted { get; init; }
+
+    /// <summary>From the header's bracket to the end of the last value below it; null for a table without a header.</summary>
+    public TomlSpan? Body { get; set; }
 
     public override string Phrase => "a table";
 

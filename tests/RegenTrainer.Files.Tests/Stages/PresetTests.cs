@@ -31,7 +31,7 @@ public sealed class PresetTests
     public void Writing_what_was_read_changes_no_byte(string name)
     {
         string text = Presets.Text(name);
-        Assert.Equal(text, StageText.Write(text, Presets.Read(name), DeviceShelf.Shipped));
+        Assert.Equal(text, StageText.Write(text, Presets.Read(name)));
     }
 
     [Theory]

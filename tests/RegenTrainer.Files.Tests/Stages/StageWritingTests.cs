@@ -70,9 +70,9 @@ public sealed class StageWritingTests
         StageDesign toleranced = _design.With("bias.collector_resistor", new FieldValue(680, null, 1));
         string written = Write(toleranced);
         Assert.Contains("collector_resistor = { value = \"680\", tolerance = \"1%\" }", written, StringComparison.Ordinal);
-        string other = StageText.Write(written, toleranced.With("bias.collector_resistor", new FieldValue(820, null, 1)), DeviceShelf.Shipped);
+        string other = StageText.Write(written, toleranced.With("bias.collector_resistor", new FieldValue(820, null, 1)));
         Assert.Contains("{ value = \"820\", tolerance = \"1%\" }", other, StringComparison.Ordinal);
-        Assert.Equal(_text, StageText.Write(written, _design, DeviceShelf.Shipped));
+        Assert.Equal(_text, StageText.Write(written, _design));
     }
 
     [Fact]
@@ -96,9 +96,9 @@ public sealed class StageWritingTests
     public void Windows_line_ends_stay()
     {
         string text = _text.ReplaceLineEndings("\r\n");
-        string written = StageText.Write(text, _design.With("tolerance.capacitor", FieldValue.Of(20)), DeviceShelf.Shipped);
+        string written = StageText.Write(text, _design.With("tolerance.capacitor", FieldValue.Of(20)));
         Assert.DoesNotContain('\n', written.Replace("\r\n", "", StringComparison.Ordinal));
-        Assert.Equal(text, StageText.Write(text, _design, DeviceShelf.Shipped));
+        Assert.Equal(text, StageText.Write(text, _design));
     }
 
     [Fact]
@@ -122,13 +122,13 @@ public sealed class StageWritingTests
                 continue;
             }
 
-            text = StageText.Write(text, next, DeviceShelf.Shipped);
+            text = StageText.Write(text, next);
             Assert.Equal(number, StageText.Read(text, "x", DeviceShelf.Shipped).Design!.Number(field.Key));
             design = next;
         }
 
-        Assert.Equal(_text, StageText.Write(text, _design, DeviceShelf.Shipped));
+        Assert.Equal(_text, StageText.Write(text, _design));
     }
 
-    private static string Write(StageDesign design) => StageText.Write(_text, design, DeviceShelf.Shipped);
+    private static string Write(StageDesign design) => StageText.Write(_text, design);
 }
