@@ -152,6 +152,27 @@ public sealed class BadStageTests
         yield return ("too-many-nodes", preset + string.Concat(Enumerable.Range(0, 201).Select(k =>
             $"[[part]]\nkind = \"resistor\"\nname = \"r{k}\"\nbetween = [\"n{k}\", \"earth\"]\nvalue = \"1M\"\n")));
 
+        // What the characters of TOML itself get wrong.
+        yield return Edited("value-without-quotes", "base_stopper = \"1k\"", "base_stopper = 4k7");
+        yield return Edited("comma-without-quotes", "turns = 84", "turns = 8,4");
+        yield return Edited("word-without-quotes", "kind = \"short-wire\"", "kind = short-wire");
+        yield return Edited("unknown-escape", "low  = \"530k\"", "low  = \"530\\k\"");
+        yield return Edited("key-of-two-words", "trimmer = \"8p\"", "trim cap = \"8p\"");
+        yield return Edited("list-not-closed", "low = 0, high = 40 }", "low = [0, 40");
+        yield return Edited("control-character", "preselector", "pre\u001bselector");
+        yield return Edited("table-after-its-dots", "[dial]", "coil.turns = 3\n[dial]");
+
+        // Columns count written characters, escapes and all.
+        yield return Edited("wrong-behind-an-escape", "base_coupling = \"220p\"", "base_coupling = \"22\\u0030p!\"");
+        yield return Edited("wrong-in-three-quotes", "base_coupling = \"220p\"", "base_coupling = \"\"\"\n220p!\"\"\"");
+
+        // Values that only together are wrong are told although a key is unknown, and not where one of them was refused.
+        yield return Edited("unknown-and-impossible", "base = 24 }", "base = 90 }\ncolour = \"green\"");
+        yield return Edited("refused-and-no-echo", "min = \"12p\", max = \"365p\", law = \"straight-line-capacitance\"", "law = \"odd\"");
+        yield return Edited("table-out-of-range", "temperature = { low = 0, high = 40 }", "temperature = { low = 0, high = 400 }");
+        yield return Edited("tolerance-beyond-all", "base_coupling = \"220p\"", "base_coupling = { value = \"220p\", tolerance = 250 }");
+        yield return Freely("pairs-out-of-range", "capacitor = { min = \"12p\", max = \"365p\" }", "capacitor = { law = \"table\", table = [[0, 12e-12], [9000, -1], [3]] }");
+
         // All at once.
         yield return ("many-faults", preset.Replace("\"680\"", "\"680 pF\"", StringComparison.Ordinal)
             .Replace("turns = 84", "turns = \"many\"", StringComparison.Ordinal).Replace("[layout]", "[layouts]", StringComparison.Ordinal)
