@@ -88,7 +88,7 @@ public static class DeviceText
 
         // Where a sheet prints limits only, the middle of two by ratio or the one there is stands for the typical device.
         double? middle = typical ?? (low is { } l && high is { } h ? Math.Sqrt(l * h) : low ?? high);
-        if (middle is null)
+        if (middle is null && reader.Faults.Count == before)
         {
             inner.Refuse(inner.Table.At, $"no figure in {key}", "typical, min or max");
         }

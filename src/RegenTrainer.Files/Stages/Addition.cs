@@ -62,7 +62,7 @@ internal sealed class Addition(TextEdits edits, string text, TomlTable root)
     {
         if (table.Entries.Count > 0)
         {
-            edits.Insert(table.Entries[^1].Line.End, ", " + line);
+            edits.Insert(table.Written[^1].Entry.Line.End, ", " + line);
         }
         else
         {

@@ -16,49 +16,62 @@ internal static class Removal
 
     private static void Remove(TextEdits edits, TomlTable table, string path, HashSet<string> gone)
     {
-        foreach (TomlEntry entry in table.Entries)
-        {
-            string key = path + entry.Key;
-            if (entry.Value is TomlTable inner && !gone.Contains(key) && gone.Any(g => g.StartsWith(key + ".", StringComparison.Ordinal)))
-            {
-                if (inner.IsInline && Empties(inner, key, gone))
-                {
-                    gone.Add(key);
-                }
-                else
-                {
-                    Remove(edits, inner, key + ".", gone);
-                }
-            }
-        }
-
-        bool[] leaves = [.. table.Entries.Select(e => gone.Contains(path + e.Key))];
+        IReadOnlyList<(string Key, TomlEntry Entry)> written = table.Written;
+        bool[] leaves = [.. written.Select(w => Leaves(w.Entry.Value, path + w.Key, gone))];
         int lastKept = Array.LastIndexOf(leaves, false);
         for (int k = 0; k < leaves.Length; k++)
         {
+            TomlSpan line = written[k].Entry.Line;
             if (!leaves[k])
             {
-                continue;
+                if (written[k].Entry.Value is TomlTable braces)
+                {
+                    Remove(edits, braces, $"{path}{written[k].Key}.", gone);
+                }
             }
-
-            TomlSpan line = table.Entries[k].Line;
-            if (!table.IsInline)
+            else if (!table.IsInline)
             {
                 edits.RemoveLines(line);
             }
             else if (k < lastKept)
             {
-                edits.Replace(new TomlSpan(line.Offset, table.Entries[k + 1].Line.Offset - line.Offset), "");
+                edits.Replace(new TomlSpan(line.Offset, written[k + 1].Entry.Line.Offset - line.Offset), "");
             }
             else
             {
-                int before = table.Entries[k - 1].Line.End;
+                int before = written[k - 1].Entry.Line.End;
                 edits.Replace(new TomlSpan(before, line.End - before), "");
+            }
+        }
+
+        Below(edits, table, path, gone);
+    }
+
+    /// <summary>Goes on into the tables under headers of their own.</summary>
+    private static void Below(TextEdits edits, TomlTable table, string path, HashSet<string> gone)
+    {
+        foreach (TomlEntry entry in table.Entries)
+        {
+            if (entry.Value is TomlTable { IsInline: false, IsDotted: false } headed)
+            {
+                Remove(edits, headed, $"{path}{entry.Key}.", gone);
+            }
+            else if (entry.Value is TomlTable { IsDotted: true } dotted)
+            {
+                Below(edits, dotted, $"{path}{entry.Key}.", gone);
             }
         }
     }
 
-    /// <summary>Whether all values of a table in braces go.</summary>
-    private static bool Empties(TomlTable table, string path, HashSet<string> gone) =>
-        table.Entries.All(e => gone.Contains($"{path}.{e.Key}") || (e.Value is TomlTable inner && Empties(inner, $"{path}.{e.Key}", gone)));
+    /// <summary>Whether a value goes: itself, or all there is in its braces.</summary>
+    private static bool Leaves(TomlValue value, string key, HashSet<string> gone)
+    {
+        if (gone.Contains(key) || value is not TomlTable braces)
+        {
+            return gone.Contains(key);
+        }
+
+        IReadOnlyList<(string Key, TomlEntry Entry)> inside = braces.Written;
+        return inside.Count > 0 && inside.All(i => Leaves(i.Entry.Value, $"{key}.{i.Key}", gone));
+    }
 }

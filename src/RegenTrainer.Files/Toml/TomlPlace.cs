@@ -6,6 +6,19 @@ namespace RegenTrainer.Files.Toml;
 internal readonly record struct TomlPlace(int Line, int Column)
 {
     public static readonly TomlPlace Start = new(1, 1);
+
+    /// <summary>The place behind some text that begins here; both halves of a character count once.</summary>
+    public TomlPlace Behind(ReadOnlySpan<char> text)
+    {
+        int lines = text.Count('\n');
+        int column = lines == 0 ? Column : 1;
+        foreach (char c in text[(text.LastIndexOf('\n') + 1)..])
+        {
+            column += char.IsLowSurrogate(c) ? 0 : 1;
+        }
+
+        return new TomlPlace(Line + lines, column);
+    }
 }
 
 /// <summary>A span of a text by character offsets.</summary>

@@ -71,7 +71,7 @@ internal sealed class TomlReader
             // What follows the first fault is mostly its echo.
             DiagnosticMessage first = document.Diagnostics.First(d => d.Kind == DiagnosticMessageKind.Error);
             (int offset, string found, string expected) = SyntaxWording.Of(_text, first.Span.Start.Offset, first.Message);
-            Refuse(PlaceAt(offset), found, expected);
+            Refuse(TomlPlace.Start.Behind(_text.AsSpan(0, offset)), found, expected);
             return null;
         }
 
@@ -237,12 +237,6 @@ internal sealed class TomlReader
     };
 
     private string Written(TomlSpan span) => _text.Substring(span.Offset, Math.Min(span.Length, 40));
-
-    private TomlPlace PlaceAt(int offset)
-    {
-        ReadOnlySpan<char> before = _text.AsSpan(0, offset);
-        return new TomlPlace(before.Count('\n') + 1, offset - before.LastIndexOf('\n'));
-    }
 
     private static TomlPlace Place(SourceSpan span) => new(span.Start.Line + 1, span.Start.Column + 1);
 

@@ -16,14 +16,7 @@ internal sealed record TomlText(TomlPlace At, TomlSpan Span, string Text, string
         : Text.Length <= LongestQuote ? $"\"{Text}\"" : $"\"{Text[..LongestQuote]}...\"";
 
     /// <summary>The place of a character of the string.</summary>
-    public TomlPlace PlaceOf(int offset)
-    {
-        ReadOnlySpan<char> before = Written.AsSpan(0, QuotedText.OffsetOf(Written, offset));
-        int lines = before.Count('\n');
-        return lines == 0
-            ? At with { Column = At.Column + before.Length }
-            : new TomlPlace(At.Line + lines, before.Length - before.LastIndexOf('\n'));
-    }
+    public TomlPlace PlaceOf(int offset) => At.Behind(Written.AsSpan(0, QuotedText.OffsetOf(Written, offset)));
 }
 
 /// <summary>A number.</summary>
@@ -66,7 +59,30 @@ internal sealed record TomlTable(TomlPlace At, TomlSpan Span) : TomlValue(At, Sp
 
     public override string Phrase => "a table";
 
+    /// <summary>
+    /// What is written in the table itself, by place, with the keys from here on: an entry under dotted keys stands here, one
+    /// under a header or in braces of its own does not.
+    /// </summary>
+    public IReadOnlyList<(string Key, TomlEntry Entry)> Written => [.. Flat("").OrderBy(e => e.Entry.Line.Offset)];
+
     public TomlEntry? Find(string key) => _byKey.GetValueOrDefault(key);
+
+    private IEnumerable<(string Key, TomlEntry Entry)> Flat(string path)
+    {
+        foreach (TomlEntry entry in Entries)
+        {
+            IEnumerable<(string, TomlEntry)> here = entry.Value switch
+            {
+                TomlTable { IsDotted: true } dotted => dotted.Flat($"{path}{entry.Key}."),
+                TomlTable { IsInline: false } or TomlTables => [],
+                _ => [(path + entry.Key, entry)],
+            };
+            foreach ((string, TomlEntry) one in here)
+            {
+                yield return one;
+            }
+        }
+    }
 
     /// <summary>Adds an entry; false where the key is there already.</summary>
     public bool TryAdd(TomlEntry entry)

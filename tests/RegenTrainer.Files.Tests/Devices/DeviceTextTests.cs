@@ -41,7 +41,7 @@ public sealed class DeviceTextTests
     [InlineData("device/1", "device/2", "1:10: found \"regentrainer.device/2\", expected \"regentrainer.device/1\"")]
     [InlineData("\"pnp\"", "\"both\"", "4:12: found \"both\", expected one of \"npn\", \"pnp\"")]
     [InlineData("kind = \"bipolar\"", "kind = \"triode\"", "3:8: found \"triode\", expected \"bipolar\"")]
-    [InlineData("at = \"2 mA\"", "at = \"2 mV\"", "5:65: found volt, expected ampere")]
+    [InlineData("at = \"2 mA\"", "at = \"2 mV\"", "5:64: found volt, expected ampere")]
     [InlineData("min = 200", "min = 300", "5:16: found current_gain out of order, expected min, typical and max rising")]
     [InlineData(", source = \"usual\"", ", sourse = \"usual\"", "9:60: found the unknown key \"sourse\", expected \"source\"")]
     [InlineData("known = \"print\", source = \"a sheet\" }\ntrans", "known = \"print\" }\ntrans", "5:16: found no source, expected where the figure is printed")]

@@ -48,7 +48,7 @@ public sealed class LayoutTests
         circuit = "plain-tank"
         dial = { low = "530k", high = "1700k", capacitor = { min = "12p", max = "365p" } }
         antenna = { coupling = { value = "5p", tolerance = 5 } }
-        regeneration = { factor = { max = 0.02 } }
+        regeneration = { factor.max = 0.02, rotation.mechanical = 300 , factor.min = 0 }
         """;
 
     public static TheoryData<string> Layouts => [Headers, Dots, Braces, Headers.ReplaceLineEndings("\r\n"), Braces + "\n# end", Presets.Text("plain-tank")];
