@@ -22,7 +22,7 @@ internal static class Figures
     public static int Run(TextWriter output)
     {
         Job job = Job.Default.WithToolchain(InProcessEmitToolchain.Instance).WithLaunchCount(1)
-            .WithWarmupCount(4).WithIterationCount(12).WithIterationTime(Perfolizer.Horology.TimeInterval.FromMilliseconds(100));
+            .WithWarmupCount(15).WithIterationCount(21).WithIterationTime(Perfolizer.Horology.TimeInterval.FromMilliseconds(100));
         ManualConfig config = ManualConfig.CreateEmpty().AddJob(job).AddLogger(NullLogger.Instance)
             .AddColumnProvider(BenchmarkDotNet.Columns.DefaultColumnProviders.Instance)
             .WithOptions(ConfigOptions.DisableOptimizationsValidator)
@@ -41,11 +41,16 @@ internal static class Figures
             }
 
             long bytes = report.GcStats.GetBytesAllocatedPerOperation(report.BenchmarkCase) ?? -1;
-            output.WriteLine(string.Create(
-                CultureInfo.InvariantCulture,
-                $"{meaning,-57} {statistics.Median / 1000,9:0.00} us {most,9:0} us {statistics.Median / unit,12:0} {bytes,7}"));
+            Line(meaning, statistics.Median / 1000, most, bytes);
         }
 
+        (double median, double p99, double bytesPerKey) = KeyToFrame.Run();
+        Line("key to end of draw at 120x40, median", median, 4000, bytesPerKey);
+        Line("key to end of draw at 120x40, 99th percentile", p99, 16000, bytesPerKey);
         return 0;
+
+        void Line(string meaning, double microseconds, double most, double bytes) => output.WriteLine(string.Create(
+            CultureInfo.InvariantCulture,
+            $"{meaning,-57} {microseconds,9:0.00} us {most,9:0} us {microseconds * 1000 / unit,12:0} {bytes,7:0}"));
     }
 }

@@ -9,7 +9,7 @@ namespace RegenTrainer.Core.Circuits;
 public static class ModeSolver
 {
     /// <summary>The iteration squares its error at least, so that a last change of this size leaves rounding only.</summary>
-    private const double Tolerance = 1e-9;
+    private const double Tolerance = 1e-8;
 
     private const int StepLimit = 40;
 
@@ -39,18 +39,14 @@ public static class ModeSolver
             w.CShape.CopyTo(w.NextShape, 0);
             w.CLeftShape.CopyTo(w.NextLeftShape, 0);
             w.PencilLu.SolveBoth(w.NextShape, w.NextLeftShape);
-            if (!Workspace.Normalise(w.NextLeftShape, out _) || !Workspace.Normalise(w.NextShape, out Complex scale))
+            if (!Workspace.TryScale(w.NextLeftShape, w.LeftShape, out _) || !Workspace.TryScale(w.NextShape, w.Shape, out double scale))
             {
                 return new ModeResult(s, tuningFarad, SolveStop.NotFinite, iteration, residual, 0);
             }
 
             // z' A y = z' (C x_old), so the quotient needs no product with G and loses no figures.
-            Complex numerator = scale * Workspace.Dot(w.NextLeftShape, w.CShape);
-
-            w.NextShape.CopyTo(w.Shape, 0);
-            w.NextLeftShape.CopyTo(w.LeftShape, 0);
+            Complex numerator = scale * Workspace.Dot(w.LeftShape, w.CShape);
             w.MultiplyC(w.Shape, w.CShape, transposed: false);
-            w.MultiplyC(w.LeftShape, w.CLeftShape, transposed: true);
             Complex weight = Workspace.Dot(w.LeftShape, w.CShape);
             Complex step = -numerator / weight;
             s += step;
@@ -71,6 +67,8 @@ public static class ModeSolver
                 double overlap = OverlapWithStart(w, startWeight * weight);
                 return new ModeResult(s, tuningFarad, SolveStop.Converged, iteration, residual, overlap);
             }
+
+            w.MultiplyC(w.LeftShape, w.CLeftShape, transposed: true);
         }
 
         return new ModeResult(s, tuningFarad, SolveStop.StepLimit, StepLimit, residual, 0);
@@ -114,7 +112,6 @@ public static class ModeSolver
         w.Values.SetTuning(change);
         s = new Complex(s.Real + (slope.Real * change), target);
         AddAcrossTuning(w, w.Shape, w.CShape, change);
-        AddAcrossTuning(w, w.LeftShape, w.CLeftShape, change);
         return Math.Abs(deviation);
     }
 

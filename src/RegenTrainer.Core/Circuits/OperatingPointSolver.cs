@@ -201,7 +201,7 @@ public static class OperatingPointSolver
             return;
         }
 
-        TwoPortPoint p = w.Values.Law(d).Evaluate(w.Port1[d], w.Port2[d]);
+        ConductionPoint p = w.Values.Law(d).Conduct(w.Port1[d], w.Port2[d]);
         NetworkValues.Add9(device.Entries, matrix, p.G11, p.G12, p.G21, p.G22);
         double i1 = p.I1 - (p.G11 * w.Port1[d]) - (p.G12 * w.Port2[d]);
         double i2 = p.I2 - (p.G21 * w.Port1[d]) - (p.G22 * w.Port2[d]);

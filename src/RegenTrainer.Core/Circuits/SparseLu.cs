@@ -236,11 +236,11 @@ public sealed class SparseLu<T>
         }
 
         Vector128<double> va = Unsafe.BitCast<T, Vector128<double>>(a), vb = Unsafe.BitCast<T, Vector128<double>>(b);
-        Vector128<double> real = Vector128.Shuffle(va, Vector128.Create(0L, 0L));
-        Vector128<double> imaginary = Vector128.Shuffle(va, Vector128.Create(1L, 1L)) * Vector128.Create(-1.0, 1.0);
+        Vector128<double> real = -Vector128.Shuffle(va, Vector128.Create(0L, 0L));
+        Vector128<double> imaginary = Vector128.Shuffle(va, Vector128.Create(1L, 1L)) * Vector128.Create(1.0, -1.0);
         Vector128<double> turned = Vector128.Shuffle(vb, Vector128.Create(1L, 0L));
         ref Vector128<double> sum = ref Unsafe.As<T, Vector128<double>>(ref target);
-        sum -= (real * vb) + (imaginary * turned);
+        sum = Vector128.FusedMultiplyAdd(real, vb, Vector128.FusedMultiplyAdd(imaginary, turned, sum));
     }
 
     private static Complex ToComplex(T value) =>

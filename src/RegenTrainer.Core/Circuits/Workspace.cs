@@ -40,7 +40,7 @@ public sealed class Workspace
     /// <summary>Linearisations at the last operating point.</summary>
     public Linearisation[] Linear { get; }
 
-    /// <summary>Right vector of the last mode: voltages and scaled currents, scaled to largest component 1.</summary>
+    /// <summary>Right vector of the last mode: voltages and scaled currents, the largest component of the size of 1.</summary>
     public Complex[] Shape { get; }
 
     /// <summary>Left vector of the last mode.</summary>
@@ -124,31 +124,29 @@ public sealed class Workspace
         return new Complex(real, imaginary);
     }
 
-    /// <summary>Scales a vector so that its largest component becomes 1; false where it is zero or not finite.</summary>
+    /// <summary>Copies a vector scaled so that its largest component is of the size of 1; false where it is zero or not finite.</summary>
     /// <param name="x">The vector.</param>
+    /// <param name="scaled">Receives it.</param>
     /// <param name="scale">The factor applied.</param>
-    internal static bool Normalise(Span<Complex> x, out Complex scale)
+    internal static bool TryScale(ReadOnlySpan<Complex> x, Span<Complex> scaled, out double scale)
     {
-        (double largest, int at) = (0, -1);
-        for (int k = 0; k < x.Length; k++)
+        double largest = 0;
+        foreach (Complex component in x)
         {
-            double size = Math.Abs(x[k].Real) + Math.Abs(x[k].Imaginary);
-            if (size > largest)
-            {
-                (largest, at) = (size, k);
-            }
+            largest = Math.Max(largest, Math.Max(Math.Abs(component.Real), Math.Abs(component.Imaginary)));   // a NaN stays
         }
 
-        scale = Complex.One;
-        if (at < 0 || !double.IsFinite(largest))
+        scale = 1 / largest;
+        if (!(largest > 0) || !double.IsFinite(largest) || !double.IsFinite(scale))
         {
             return false;
         }
 
-        scale = Complex.One / x[at];
-        for (int k = 0; k < x.Length; k++)
+        ReadOnlySpan<Vector128<double>> from = MemoryMarshal.Cast<Complex, Vector128<double>>(x);
+        Span<Vector128<double>> to = MemoryMarshal.Cast<Complex, Vector128<double>>(scaled);
+        for (int k = 0; k < from.Length; k++)
         {
-            x[k] *= scale;
+            to[k] = from[k] * scale;
         }
 
         return true;

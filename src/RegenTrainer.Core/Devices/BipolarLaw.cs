@@ -85,14 +85,41 @@ public sealed class BipolarLaw : IDeviceLaw
     public TwoPortPoint Evaluate(double v1, double v2)
     {
         double baseEmitter = _sign * v1, baseCollector = _sign * (v1 - v2);
+        ConductionPoint conduction = Conduct(baseEmitter, baseCollector, out double forwardAmpere, out double forwardSiemens);
+        (double emitterCharge, double emitterFarad) = _emitterJunction.At(baseEmitter);
+        (double collectorCharge, double collectorFarad) = _collectorJunction.At(baseCollector);
+        emitterCharge += _transitSeconds * forwardAmpere;
+        emitterFarad += _transitSeconds * forwardSiemens;
+        return new TwoPortPoint(
+            conduction.I1,
+            conduction.I2,
+            conduction.G11,
+            conduction.G12,
+            conduction.G21,
+            conduction.G22,
+            _sign * (emitterCharge + collectorCharge),
+            -_sign * collectorCharge,
+            emitterFarad + collectorFarad,
+            -collectorFarad,
+            -collectorFarad,
+            collectorFarad);
+    }
+
+    /// <inheritdoc/>
+    public ConductionPoint Conduct(double v1, double v2) => Conduct(_sign * v1, _sign * (v1 - v2), out _, out _);
+
+    private ConductionPoint Conduct(double baseEmitter, double baseCollector, out double forwardAmpere, out double forwardSiemens)
+    {
         double half = Exponential(0.5 * baseEmitter / _thermalVolt, out double halfSlope);
         (double forward, double forwardSlope) = 0.5 * baseEmitter / _thermalVolt < LargestExponent / 2
             ? (half * half, half * half)
             : (Exponential(baseEmitter / _thermalVolt, out double s), s);
         double reverse = Exponential(baseCollector / _thermalVolt, out double reverseSlope);
 
-        double forwardAmpere = _saturation * (forward - 1), reverseAmpere = _saturation * (reverse - 1);
-        double forwardSiemens = _saturation * forwardSlope / _thermalVolt, reverseSiemens = _saturation * reverseSlope / _thermalVolt;
+        forwardAmpere = _saturation * (forward - 1);
+        double reverseAmpere = _saturation * (reverse - 1);
+        forwardSiemens = _saturation * forwardSlope / _thermalVolt;
+        double reverseSiemens = _saturation * reverseSlope / _thermalVolt;
         double early = 1 - (baseCollector / _earlyVolt);
         bool held = early < SmallestEarlyFactor;
         early = held ? SmallestEarlyFactor : early;
@@ -104,24 +131,13 @@ public sealed class BipolarLaw : IDeviceLaw
         double emitterBase = (forwardAmpere * _inverseGain) + (_recombination * (half - 1));
         double emitterBaseSiemens = (forwardSiemens * _inverseGain) + (_recombination * 0.5 * halfSlope / _thermalVolt);
         double collectorBase = reverseAmpere / ReverseGain, collectorBaseSiemens = reverseSiemens / ReverseGain;
-
-        (double emitterCharge, double emitterFarad) = _emitterJunction.At(baseEmitter);
-        (double collectorCharge, double collectorFarad) = _collectorJunction.At(baseCollector);
-        emitterCharge += _transitSeconds * forwardAmpere;
-        emitterFarad += _transitSeconds * forwardSiemens;
-        return new TwoPortPoint(
+        return new ConductionPoint(
             _sign * (emitterBase + collectorBase),
             _sign * (transport - collectorBase),
             emitterBaseSiemens + collectorBaseSiemens,
             -collectorBaseSiemens,
             transportByEmitter + transportByCollector - collectorBaseSiemens,
-            collectorBaseSiemens - transportByCollector,
-            _sign * (emitterCharge + collectorCharge),
-            -_sign * collectorCharge,
-            emitterFarad + collectorFarad,
-            -collectorFarad,
-            -collectorFarad,
-            collectorFarad);
+            collectorBaseSiemens - transportByCollector);
     }
 
     /// <inheritdoc/>

@@ -3,7 +3,10 @@ using System.Text;
 
 namespace RegenTrainer.Core.Quantities;
 
-/// <summary>Terminal columns of graphemes, after the East Asian Width property (Unicode UAX #11), wide and full-width as two.</summary>
+/// <summary>
+/// Terminal columns of graphemes, after the East Asian Width property (Unicode UAX #11), wide and full-width as two. The ranges are
+/// from memory, so that a character added to Unicode lately may count as one.
+/// </summary>
 internal static class ColumnWidth
 {
     private const int EmojiSelector = 0xFE0F;

@@ -32,7 +32,7 @@ public sealed class StageWorkspace
     /// <summary>The buffers of its network.</summary>
     public Workspace Circuit { get; }
 
-    /// <summary>Lightly damped modes found when the tank was last labelled: more than one where tuned circuits are coupled.</summary>
+    /// <summary>Lightly damped modes about the dial when the tank was last labelled: more than one where tuned circuits are coupled.</summary>
     internal int Resonances { get; set; }
 
     internal Complex[] SavedShape { get; }

@@ -21,6 +21,16 @@ public static class TankFamily
         return Rings(s) && hz > dialHz / Factor && hz < dialHz * Factor;
     }
 
+    /// <summary>
+    /// Whether a natural frequency of the circuit without its regenerating device may come to belong to the family: the device's
+    /// capacitances and the tuning move it by less than another such factor, while windings resonating by themselves stay far above.
+    /// </summary>
+    internal static bool MayContain(Complex s, double dialHz)
+    {
+        double ratio = s.Imaginary / (2 * Math.PI * dialHz);
+        return ratio is > 1 / (Factor * Factor) and < Factor * Factor;
+    }
+
     /// <summary>Whether a natural frequency rings rather than creeps.</summary>
     public static bool Rings(Complex s) => s.Imaginary > 0 && Complex.Abs(s) > 2 * SmallestQ * Math.Abs(s.Real) * (1 + 1e-9);
 

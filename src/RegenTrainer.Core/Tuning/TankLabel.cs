@@ -21,7 +21,7 @@ public static class TankLabel
     /// <param name="dialHz">Dial in Hz.</param>
     /// <param name="tuningFarad">The tuning capacitor of the present pencil, in farad.</param>
     /// <param name="s">The mode's natural frequency in 1/s.</param>
-    /// <param name="resonances">How many lightly damped modes there are: more than one where circuits are coupled.</param>
+    /// <param name="resonances">How many lightly damped modes lie about the dial: more than one where circuits are coupled.</param>
     public static bool TryFind(Workspace w, double dialHz, double tuningFarad, out Complex s, out int resonances)
     {
         (s, resonances) = (default, 0);
@@ -39,7 +39,7 @@ public static class TankLabel
                 continue;
             }
 
-            resonances++;
+            resonances += TankFamily.MayContain(mode.S, dialHz) ? 1 : 0;
             double volt = Complex.Abs(NetworkValues.Across(mode.Shape, tuning.Pair.From, tuning.Pair.To));
             double share = tuningFarad * volt * volt / Energy(w, mode.Shape);
             double distance = Math.Abs(Math.Log(mode.S.Imaginary / (2 * Math.PI * dialHz)));

@@ -23,6 +23,11 @@ public class PhysicalConstantsTests
         Assert.Equal(376.730313668, PhysicalConstants.VacuumPermeability * PhysicalConstants.SpeedOfLight, 6);
     }
 
+    // The field of a coaxial loop far from it is 188.5 N I a^2/x^3 in V/m: IRE 1948, Standards on Radio Receivers, from memory.
+    [Fact]
+    public void Half_the_impedance_of_vacuum_is_the_factor_of_loop_injection() =>
+        Assert.Equal(188.365, PhysicalConstants.VacuumPermeability * PhysicalConstants.SpeedOfLight / 2, 3);
+
     // IEC 60028:1925: resistivity 1/58 = 0.017241 ohm mm2/m at 20 °C, rising 0.00393 of that per kelvin.
     [Theory]
     [InlineData(20.0, 0.017241)]

@@ -10,13 +10,6 @@ using Terminal.Gui.Time;
 
 namespace RegenTrainer.Tests.Screens;
 
-/// <summary>Statics of the screen library are the process's: tests that use it run one after the other.</summary>
-[CollectionDefinition(Name, DisableParallelization = true)]
-public sealed class OneTerminal
-{
-    public const string Name = "terminal";
-}
-
 /// <summary>A terminal without one: keys and mouse are handed in, what would be shown is read back.</summary>
 internal sealed class HeadlessTerminal : IDisposable
 {
