@@ -28,7 +28,7 @@ internal static class KeyToFrame
         var solver = new StageSolver(StageModel.Compile(Presets.Read(Presets.Default)), StageReader.DefaultAudioHz);
         var stage = new LiveStage(solver, new Setting(1e6, 45));
         Theme theme = Theme.Choose(_ => null);
-        using var terminal = new HeadlessTerminal(new StageScreen(stage, Glyphs.Of(GlyphSet.Braille), theme), theme, 120, 40);
+        using var terminal = new HeadlessTerminal(new BenchScreen(new Bench(stage), Glyphs.Of(GlyphSet.Braille), theme), theme, 120, 40);
         Press(terminal, WarmUp, null);
         double[] microseconds = new double[Keys];
         long before = GC.GetAllocatedBytesForCurrentThread();

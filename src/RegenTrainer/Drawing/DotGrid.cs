@@ -31,6 +31,30 @@ internal sealed class DotGrid
         }
     }
 
+    /// <summary>Draws a line of single dots, each some dots from the last; what lies outside is cut off.</summary>
+    /// <param name="points">The corners of the line in dots.</param>
+    /// <param name="spacing">Dots along the line from one to the next, 1 or more.</param>
+    public void Dotted(IEnumerable<(double X, double Y)> points, double spacing)
+    {
+        (double X, double Y)? before = null;
+        double ahead = 0;
+        foreach ((double x, double y) in points)
+        {
+            if (before is var (x0, y0))
+            {
+                double length = Math.Max(Math.Abs(x - x0), Math.Min(Math.Abs(y - y0), 4.0 * Height));
+                for (; ahead < length; ahead += spacing)
+                {
+                    Dot((int)Math.Round(x0 + ((x - x0) * ahead / length)), (int)Math.Round(y0 + ((y - y0) * ahead / length)));
+                }
+
+                ahead -= length;
+            }
+
+            before = (x, y);
+        }
+    }
+
     /// <summary>The uppermost row of cells a column has a dot in; the number of rows where it has none.</summary>
     public int TopOf(int column)
     {

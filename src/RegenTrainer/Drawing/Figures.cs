@@ -23,6 +23,15 @@ internal static class Figures
         _ => QuantityText.Write(q.Value, Unit.None),
     };
 
+    /// <summary>A difference of two Qs, with its sign.</summary>
+    public static string QDifference(double difference) => Math.Abs(difference) < WholeFrom
+        ? Signed(difference, "0.0")
+        : (difference > 0 ? "+" : "\u2212") + Q(Math.Abs(difference));
+
+    /// <summary>A difference of two quantities, with its sign.</summary>
+    public static string Difference(double difference, Unit unit) =>
+        (difference > 0 ? "+" : "") + QuantityText.Write(difference, unit).Replace('-', '\u2212');
+
     public static string Quantity(double? value, Unit unit, int figures = 3) =>
         value is { } v ? QuantityText.Write(v, unit, figures).Replace('-', '\u2212') : None;
 

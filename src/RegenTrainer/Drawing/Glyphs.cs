@@ -106,6 +106,9 @@ internal sealed class Glyphs
     /// <summary>Dots of a plot in one cell, one above the other.</summary>
     public int DotsDown { get; }
 
+    /// <summary>Dots from one to the next of a dotted curve.</summary>
+    public int DotSpacing => Set == GlyphSet.Braille ? 4 : 2;
+
     /// <summary>Under the curve, where the programme's sidebands are.</summary>
     public required string Shade { get; init; }
 

@@ -15,6 +15,9 @@ internal enum Ink
     /// <summary>The response.</summary>
     Response,
 
+    /// <summary>What is pinned for comparison.</summary>
+    Pinned,
+
     /// <summary>The span of the programme's sidebands.</summary>
     Sidebands,
 

@@ -1,19 +1,22 @@
 namespace RegenTrainer.Drawing;
 
-/// <summary>The keys there are, in words.</summary>
+/// <summary>The keys there are, in words, by what they are for.</summary>
 internal static class KeyList
 {
     private const int KeyWidth = 12;
     private const int Gap = 3;
 
-    private static readonly (string Key, string Does)[] _hands =
+    private static readonly (string Key, string Does)[] _control =
     [
-        ("Left Right", "control by 0.5 %"),
-        ("with Shift", "by 0.05 %, also n m"),
-        ("with Ctrl", "by 5 %, also N M"),
+        ("Left Right", "by 0.5 %"),
+        ("Shift, n m", "by 0.05 %"),
+        ("Ctrl, N M", "by 5 %"),
         ("Home End", "the stops"),
         ("t", "0.3 dB below tip-over"),
-        ("mouse", "wheel and drag on strip"),
+    ];
+
+    private static readonly (string Key, string Does)[] _conditions =
+    [
         ("v V", "supply by 0.1 V"),
         ("c C", "temperature by 1 \u00b0C"),
         ("d", "weak, typical, strong"),
@@ -27,26 +30,39 @@ internal static class KeyList
         ("[ ]", "station by one channel"),
         ("{ }", "station by 1 kHz"),
         ("=", "station back to dial"),
-        ("?", "these keys"),
+    ];
+
+    private static readonly (string Key, string Does)[] _bench =
+    [
+        ("p", "pin for comparison"),
         ("Esc", "closes what is open"),
         ("q", "quit"),
     ];
 
-    public static void Draw(Canvas canvas, Region region)
+    /// <summary>Draws the keys of the hands and the bench, and those of the open page.</summary>
+    public static void Draw(Canvas canvas, Region region, string page, IReadOnlyList<(string Key, string Does)> pageKeys)
     {
-        canvas.Put(region.Left, region.Top, "keys (? or Esc closes)", Ink.Heading, region.Right);
         int half = (region.Width - Gap) / 2;
-        Column(canvas, new Region(region.Left, region.Top + 2, half, region.Height - 2), _hands);
-        Column(canvas, new Region(region.Left + half + Gap, region.Top + 2, half, region.Height - 2), _tuning);
+        var left = new Region(region.Left, region.Top, half, region.Height);
+        left = Group(canvas, left, "regeneration control; wheel and drag on the strip", _control);
+        left = Group(canvas, left, "battery, room, device", _conditions);
+        Group(canvas, left, "this page: " + page, pageKeys);
+        var right = new Region(region.Left + half + Gap, region.Top, half, region.Height);
+        right = Group(canvas, right, "tuning", _tuning);
+        Group(canvas, right, "bench; digits and clicks open pages", _bench);
     }
 
-    private static void Column(Canvas canvas, Region region, (string Key, string Does)[] keys)
+    /// <summary>Draws one group and returns what is left of the region.</summary>
+    private static Region Group(Canvas canvas, Region region, string heading, IReadOnlyList<(string Key, string Does)> keys)
     {
         int row = region.Top;
+        canvas.Put(region.Left, row++, heading, Ink.Heading, region.Right);
         foreach ((string key, string does) in keys)
         {
             canvas.Put(region.Left, row, key, Ink.Text, region.Right);
             canvas.Put(region.Left + KeyWidth, row++, does, Ink.Label, region.Right);
         }
+
+        return region with { Top = row, Height = region.Bottom - row };
     }
 }

@@ -1,14 +1,15 @@
-using RegenTrainer.Core.Quantities;
 using RegenTrainer.Core.Readings;
-using RegenTrainer.Core.Selectivity;
 
 namespace RegenTrainer.Drawing;
 
 /// <summary>The figures beside the response, or why there are none.</summary>
 internal static class ReadoutColumn
 {
+    /// <summary>Columns that the differences to what is pinned take.</summary>
+    public const int DifferenceWidth = 11;
+
     /// <summary>Draws them; every figure stands on the same row whatever the regime.</summary>
-    public static void Draw(Canvas canvas, Region region, Reading reading)
+    public static void Draw(Canvas canvas, Region region, Reading reading, Reading? pinned)
     {
         if (reading.TankHz is null)
         {
@@ -18,44 +19,18 @@ internal static class ReadoutColumn
             return;
         }
 
-        int row = region.Top;
-        foreach ((string label, string figure) in Rows(reading))
+        IReadOnlyList<Readout> now = Readout.Of(reading);
+        IReadOnlyList<Readout>? then = pinned is null ? null : Readout.Of(pinned);
+        int figures = region.Right - (then is null ? 0 : DifferenceWidth);
+        for (int k = 0; k < now.Count && k < region.Height; k++)
         {
-            if (row >= region.Bottom)
+            int row = region.Top + k;
+            canvas.Put(region.Left, row, now[k].Label, Ink.Label, figures);
+            canvas.PutBefore(figures, row, now[k].Write(now[k].Value), Ink.Text);
+            if (now[k].Value is { } value && then?[k].Value is { } old)
             {
-                return;
-            }
-
-            canvas.Put(region.Left, row, label, Ink.Label, region.Right);
-            canvas.PutBefore(region.Right, row++, figure, Ink.Text);
-        }
-    }
-
-    private static IEnumerable<(string Label, string Figure)> Rows(Reading reading)
-    {
-        yield return ("effective Q", Figures.Q(reading.EffectiveQ));
-        yield return ("  regeneration off", Figures.Q(reading.QRegenerationOff));
-        yield return ("bandwidth \u22123 dB", Figures.Quantity(reading.BandwidthHz, Unit.Hertz));
-        yield return ("stage gain", Figures.Level(reading.StageGainDb));
-        yield return ("1 kHz sideband", Sideband(reading, 1000));
-        yield return ("3 kHz sideband", Sideband(reading, 3000));
-        yield return ("ring time", Figures.Quantity(reading.RingTimeSeconds, Unit.Second));
-        yield return ("speech index", reading.SpeechIndex is { } index ? Figures.Fixed(index, "0.00") : Figures.None);
-        yield return ("pulled", Figures.Shift(reading.PulledHz));
-        yield return ("tank", Figures.Tank(reading.TankHz));
-        yield return ("tuning capacitor", Figures.Quantity(reading.TuningFarad, Unit.Farad));
-    }
-
-    private static string Sideband(Reading reading, double audioHz)
-    {
-        foreach (Sideband sideband in reading.Sidebands)
-        {
-            if (sideband.AudioHz == audioHz)
-            {
-                return Figures.Level(sideband.AudioDb);
+                canvas.PutBefore(region.Right, row, now[k].WriteDifference(value - old), Ink.Pinned);
             }
         }
-
-        return Figures.None;
     }
 }

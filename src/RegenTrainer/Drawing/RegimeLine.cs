@@ -11,12 +11,13 @@ internal static class RegimeLine
     /// <summary>The caution that the words of the regime say themselves.</summary>
     private const string OscillatingCode = "oscillating";
 
-    public static void Draw(Canvas canvas, int row, StageSnapshot stage)
+    /// <summary>Draws it; what a key could not do or the bench has to tell goes before the cautions of the stage.</summary>
+    public static void Draw(Canvas canvas, int row, StageSnapshot stage, string notice)
     {
         Reading reading = stage.Reading;
         Ink ink = reading.Regime is { } regime ? Figures.InkOf(regime) : Ink.Caution;
         int column = canvas.Put(1, row, Words(reading), ink == Ink.Idle ? Ink.Text : ink);
-        string more = stage.Notice.Length > 0 ? stage.Notice : Cautions(reading);
+        string more = stage.Notice.Length > 0 ? stage.Notice : notice.Length > 0 ? notice : Cautions(reading);
         if (more.Length > 0)
         {
             column = canvas.Put(column, row, ". ", Ink.Label);

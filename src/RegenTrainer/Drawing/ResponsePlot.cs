@@ -16,6 +16,9 @@ internal static class ResponsePlot
     /// <summary>The caution that names the frequency where it is not the tank that oscillates.</summary>
     private const string OtherCircuitCode = "other-circuit-oscillates";
 
+    /// <summary>Narrower plots have shorter words.</summary>
+    private const int FullFrom = 42;
+
     /// <summary>The scale divides into eighths of its span.</summary>
     private const int ColumnParts = 8;
 
@@ -30,35 +33,57 @@ internal static class ResponsePlot
     /// <summary>The largest width up to <paramref name="room"/> at which the station, its neighbours and its channel's ends stand in columns of their own.</summary>
     public static int EvenWidth(int room) => room - ((room - ScaleWidth - 1) % ColumnParts);
 
-    public static void Draw(Canvas canvas, Region region, StageSnapshot stage)
+    /// <summary>How far from the station a cell lies, in Hz; null outside of the picture.</summary>
+    public static double? OffsetAt(Region region, int column, int row)
     {
-        canvas.Put(region.Left, region.Top, "response, \u00b120 kHz around the station", Ink.Label, region.Right);
+        var plot = Picture(region);
+        return column >= plot.Left && column < plot.Right && row >= plot.Top && row <= plot.Bottom
+            ? (((column - plot.Left) / (double)(plot.Width - 1) * 2) - 1) * LiveStage.HalfSpanHz
+            : null;
+    }
+
+    /// <summary>Draws it over the curves of what the stage is compared with, each about its own station.</summary>
+    public static void Draw(Canvas canvas, Region region, StageSnapshot stage, in Compared compared)
+    {
+        string heading = region.Width >= FullFrom ? "response, \u00b120 kHz around the station" : "\u00b120 kHz around the station";
+        canvas.Put(region.Left, region.Top, heading, Ink.Label, region.Right);
         if (stage.Curve.Count < 2)
         {
             NoResponse(canvas, region with { Top = region.Top + 2, Height = region.Height - 2 }, stage);
             return;
         }
 
-        var plot = new Region(region.Left + ScaleWidth, region.Top + 2, region.Width - ScaleWidth, region.Height - OtherRows);
+        Region plot = Picture(region);
         double stationHz = stage.Reading.Setting.StationHz;
-        double peakDb = stage.Curve.Max(point => point.GainDb);
+        double peakDb = compared.Earlier.Select(earlier => earlier.Stage).Append(stage).SelectMany(s => s.Curve).Max(point => point.GainDb);
         double lowestDb = stage.Curve.Min(point => point.GainDb) - peakDb;
         int depth = Array.Find(_depthsDb, d => lowestDb >= -d) is > 0 and var found ? found : _depthsDb[^1];
         var grid = new DotGrid(plot.Width, plot.Height, canvas.Glyphs);
-        double ToX(double hz) => (hz - stationHz + LiveStage.HalfSpanHz) / (2 * LiveStage.HalfSpanHz) * (grid.Width - 1);
+        double ToX(double offsetHz) => (offsetHz + LiveStage.HalfSpanHz) / (2 * LiveStage.HalfSpanHz) * (grid.Width - 1);
         double ToY(double db) => Math.Clamp((peakDb - db) / depth, -1, 2) * (grid.Height - 1);
         for (int k = 1; k < stage.Curve.Count; k++)
         {
             (ResponsePoint a, ResponsePoint b) = (stage.Curve[k - 1], stage.Curve[k]);
-            grid.Line(ToX(a.FrequencyHz), ToY(a.GainDb), ToX(b.FrequencyHz), ToY(b.GainDb));
+            grid.Line(ToX(a.FrequencyHz - stationHz), ToY(a.GainDb), ToX(b.FrequencyHz - stationHz), ToY(b.GainDb));
         }
 
         Shade(canvas, plot, grid, stage.Dial.StepHz / 2);
+        foreach ((StageSnapshot earlier, Ink ink) in compared.Earlier)
+        {
+            var dotted = new DotGrid(plot.Width, plot.Height, canvas.Glyphs);
+            double center = earlier.Reading.Setting.StationHz;
+            dotted.Dotted(earlier.Curve.Select(point => (ToX(point.FrequencyHz - center), ToY(point.GainDb))), canvas.Glyphs.DotSpacing);
+            dotted.CopyTo(canvas, plot.Left, plot.Top, ink);
+        }
+
         grid.CopyTo(canvas, plot.Left, plot.Top, Ink.Response);
         DecibelScale(canvas, region.Left, plot, depth);
         KilohertzScale(canvas, plot);
         Neighbours(canvas, region, plot, grid, stage);
     }
+
+    private static Region Picture(Region region) =>
+        new(region.Left + ScaleWidth, region.Top + 2, region.Width - ScaleWidth, region.Height - OtherRows);
 
     /// <summary>The column of a distance from the station.</summary>
     internal static int ColumnOf(Region plot, double offsetHz) =>
@@ -101,7 +126,7 @@ internal static class ResponsePlot
             {
                 canvas.PutBefore(plot.Right, plot.Bottom + 1, label + " kHz", Ink.Label);
             }
-            else
+            else if (khz != SpanKhz / 2 || plot.Width + ScaleWidth >= FullFrom)
             {
                 canvas.Put(column - (khz == -SpanKhz ? 0 : label.Length / 2), plot.Bottom + 1, label, Ink.Label);
             }
@@ -118,6 +143,11 @@ internal static class ResponsePlot
         }
 
         string words = string.Join(", ", next.Select(n => $"{Figures.Signed(n.OffsetHz / 1000, "0.##")} kHz {Figures.Level(n.RelativeDb)}"));
+        if (region.Width < FullFrom)
+        {
+            words = string.Join(", ", next.Select(n => Figures.Signed(n.RelativeDb, "0"))) + " dB";
+        }
+
         canvas.Put(region.Left, region.Top + 1, "o neighbours " + words, Ink.Text, region.Right);
         foreach (Neighbour neighbour in next.Where(n => Math.Abs(n.OffsetHz) < LiveStage.HalfSpanHz))
         {

@@ -18,9 +18,9 @@ internal static class ScreenCommand
     /// <returns>0, 70 after a fault, 128 and the number of a signal.</returns>
     public static int Run(IStageSolver solver, Setting start, GlyphSet? glyphs, Func<Exception, string> describeFault)
     {
-        var stage = new LiveStage(solver, start);
+        var bench = new Bench(new LiveStage(solver, start));
         Theme theme = Theme.Choose(Environment.GetEnvironmentVariable);
         Glyphs chosen = Glyphs.Of(GlyphChoice.Choose(glyphs, Environment.GetEnvironmentVariable));
-        return TuiHost.Run(() => new StageScreen(stage, chosen, theme), theme, describeFault);
+        return TuiHost.Run(() => new BenchScreen(bench, chosen, theme), theme, describeFault);
     }
 }

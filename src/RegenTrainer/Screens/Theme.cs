@@ -16,6 +16,7 @@ internal sealed class Theme
     private const string SkyBlue = "#56b4e9";
     private const string BluishGreen = "#009e73";
     private const string Yellow = "#f0e442";
+    private const string Orange = "#e69f00";
     private const string Vermillion = "#d55e00";
 
     private readonly Attribute[] _attributes;
@@ -58,6 +59,7 @@ internal sealed class Theme
             Ink.Label => (Grey, TextStyle.None),
             Ink.Heading => (White, TextStyle.Bold),
             Ink.Response => (SkyBlue, TextStyle.None),
+            Ink.Pinned => (Orange, TextStyle.None),
             Ink.Sidebands => (BluishGreen, TextStyle.None),
             Ink.Idle => (Grey, TextStyle.None),
             Ink.Working => (SkyBlue, TextStyle.None),

@@ -10,17 +10,17 @@ using Glyphs = RegenTrainer.Drawing.Glyphs;
 namespace RegenTrainer.Tests.Screens;
 
 [Collection(OneTerminal.Name)]
-public sealed class StageScreenTests : IDisposable
+public sealed class BenchScreenTests : IDisposable
 {
     private static readonly Theme _colour = Theme.Choose(_ => null);
 
     private readonly LiveStage _live = new(new MadeUpStage((60, true)), new Setting(1e6, 40));
-    private readonly StageScreen _screen;
+    private readonly BenchScreen _screen;
     private readonly HeadlessTerminal _terminal;
 
-    public StageScreenTests()
+    public BenchScreenTests()
     {
-        _screen = new StageScreen(_live, Glyphs.Braille, _colour);
+        _screen = new BenchScreen(new Bench(_live), Glyphs.Braille, _colour);
         _terminal = new HeadlessTerminal(_screen, _colour);
     }
 
@@ -186,7 +186,7 @@ public sealed class StageScreenTests : IDisposable
     public void A_failed_solve_keeps_the_screen_alive()
     {
         var live = new LiveStage(new MadeUpStage((60, true)) { Failure = "no operating point: it did not settle" }, new Setting(1e6, 40));
-        using var screen = new StageScreen(live, Glyphs.Braille, _colour);
+        using var screen = new BenchScreen(new Bench(live), Glyphs.Braille, _colour);
         using var terminal = new HeadlessTerminal(screen, _colour);
         terminal.Type("t.vdl]=");
         terminal.Press(Key.CursorRight);
@@ -207,7 +207,7 @@ public sealed class StageScreenTests : IDisposable
     public void NO_COLOR_carries_no_colour()
     {
         Theme mono = Theme.Choose(name => name == "NO_COLOR" ? "1" : null);
-        using var screen = new StageScreen(_live, Glyphs.Braille, mono);
+        using var screen = new BenchScreen(new Bench(_live), Glyphs.Braille, mono);
         using var terminal = new HeadlessTerminal(screen, mono);
         Assert.All(AllCells(terminal), cell => Assert.Equal((Color.None, Color.None), (cell.Attribute!.Value.Foreground, cell.Attribute.Value.Background)));
         Assert.Equal(_terminal.Text, terminal.Text);
