@@ -19,6 +19,18 @@ public interface IStageSolver
     /// <summary>Nominal supply in volt; null where the stage has none.</summary>
     double? SupplyVolt { get; }
 
+    /// <summary>Whether the regenerating device comes in grades.</summary>
+    bool HasGrades { get; }
+
+    /// <summary>Another solver of the same stage, for another thread.</summary>
+    IStageSolver Fork();
+
+    /// <summary>The run along the dial at frequencies in Hz.</summary>
+    IReadOnlyList<DialPoint> AlongDial(Setting setting, IReadOnlyList<double> dialHz);
+
+    /// <summary>How audio frequencies in Hz fare; empty above tip-over, out of reach or unsolved.</summary>
+    IReadOnlyList<Sideband> Sidebands(Setting setting, IReadOnlyList<double> audioHz);
+
     /// <summary>Everything computed for one setting; where a solve fails the figures are null and a caution says why.</summary>
     Reading Read(Setting setting);
 

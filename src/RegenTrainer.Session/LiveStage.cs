@@ -43,6 +43,9 @@ public sealed class LiveStage
         }
     }
 
+    /// <summary>The stage's solver.</summary>
+    public IStageSolver Solver => _solver;
+
     /// <summary>Where the hands are.</summary>
     public Setting Setting => _setting;
 

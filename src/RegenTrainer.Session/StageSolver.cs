@@ -25,6 +25,18 @@ public sealed class StageSolver(StageModel model, IReadOnlyList<double> audioHz)
     public double? SupplyVolt => model.Circuit.SupplyVolt;
 
     /// <inheritdoc/>
+    public bool HasGrades => model.RegeneratingType is not null;
+
+    /// <inheritdoc/>
+    public IStageSolver Fork() => new StageSolver(model, audioHz);
+
+    /// <inheritdoc/>
+    public IReadOnlyList<DialPoint> AlongDial(Setting setting, IReadOnlyList<double> dialHz) => StageReader.AlongDial(_workspace, setting, dialHz);
+
+    /// <inheritdoc/>
+    public IReadOnlyList<Sideband> Sidebands(Setting setting, IReadOnlyList<double> audioHz) => StageReader.Read(_workspace, setting, audioHz).Sidebands;
+
+    /// <inheritdoc/>
     public Reading Read(Setting setting) => StageReader.Read(_workspace, setting, audioHz);
 
     /// <inheritdoc/>

@@ -36,6 +36,30 @@ public sealed class MadeUpStage(params (double TravelPercent, bool Upward)[] cro
 
     public int RegimeRuns { get; private set; }
 
+    public bool HasGrades => Device is not null;
+
+    public IStageSolver Fork() => this;
+
+    public IReadOnlyList<DialPoint> AlongDial(Setting setting, IReadOnlyList<double> dialHz) =>
+    [
+        .. dialHz.Select(hz =>
+        {
+            Reading reading = Read(setting with { DialHz = hz });
+            return new DialPoint(hz, reading.Reachable)
+            {
+                TuningFarad = reading.TuningFarad,
+                TipOver = reading.TipOver,
+                EffectiveQ = reading.EffectiveQ,
+                BandwidthHz = reading.BandwidthHz,
+                StageGainDb = reading.StageGainDb,
+                PulledHz = reading.PulledHz,
+            };
+        }),
+    ];
+
+    public IReadOnlyList<Sideband> Sidebands(Setting setting, IReadOnlyList<double> audioHz) =>
+        LoopGain(setting.TravelPercent) >= 1 ? [] : [.. audioHz.Select(hz => new Sideband(hz, -hz / 400, -hz / 500, -hz / 450))];
+
     public Reading Read(Setting setting)
     {
         Reads++;

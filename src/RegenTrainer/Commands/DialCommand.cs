@@ -5,12 +5,16 @@ using RegenTrainer.Core.Readings;
 using RegenTrainer.Core.Stages;
 using RegenTrainer.Core.Tuning;
 using RegenTrainer.Files.Reports;
+using RegenTrainer.Session;
 
 namespace RegenTrainer.Commands;
 
 /// <summary><c>regentrainer dial STAGE</c>: tip-over, Q, bandwidth, gain and pull along the whole dial.</summary>
 internal static class DialCommand
 {
+    /// <summary>More points than this nobody reads.</summary>
+    private const int MostPoints = 2000;
+
     public static Command Create(CommandContext context)
     {
         var stage = CommandContext.StageArgument();
@@ -30,12 +34,12 @@ internal static class DialCommand
     private static int Run(CommandContext context, ParseResult line, OpenedStage opened, Setting asked, double? stationHz)
     {
         var workspace = new StageWorkspace(opened.Model);
-        IReadOnlyList<double> raster = DialRaster.Points(opened.Model.Circuit.Dial, out int every);
+        IReadOnlyList<double> raster = DialRaster.Points(opened.Model.Circuit.Dial, MostPoints, out int every);
         var cautions = new List<Caution>();
         if (every > 1)
         {
             cautions.Add(new Caution(
-                "raster-thinned", $"the raster has over {DialRaster.MostPoints} points; each {every}. one and both ends are shown"));
+                "raster-thinned", $"the raster has over {MostPoints} points; each {every}. one and both ends are shown"));
         }
 
         var points = new List<DialPoint>(raster.Count);

@@ -31,24 +31,23 @@ internal sealed class DotGrid
         }
     }
 
-    /// <summary>Draws a line of single dots, each some dots from the last; what lies outside is cut off.</summary>
-    /// <param name="points">The corners of the line in dots.</param>
-    /// <param name="spacing">Dots along the line from one to the next, 1 or more.</param>
-    public void Dotted(IEnumerable<(double X, double Y)> points, double spacing)
+    /// <summary>Draws a line through points in dots, interrupted as the stroke says; what lies outside is cut off.</summary>
+    public void Line(IEnumerable<(double X, double Y)> points, Stroke stroke)
     {
         (double X, double Y)? before = null;
-        double ahead = 0;
+        int along = 0;
         foreach ((double x, double y) in points)
         {
             if (before is var (x0, y0))
             {
-                double length = Math.Max(Math.Abs(x - x0), Math.Min(Math.Abs(y - y0), 4.0 * Height));
-                for (; ahead < length; ahead += spacing)
+                double steps = Math.Ceiling(Math.Max(Math.Abs(x - x0), Math.Min(Math.Abs(y - y0), 4.0 * Height)));
+                for (int k = 0; k < steps; k++)
                 {
-                    Dot((int)Math.Round(x0 + ((x - x0) * ahead / length)), (int)Math.Round(y0 + ((y - y0) * ahead / length)));
+                    if (along++ % (stroke.On + stroke.Off) < stroke.On)
+                    {
+                        Dot((int)Math.Round(x0 + ((x - x0) * k / steps)), (int)Math.Round(y0 + ((y - y0) * k / steps)));
+                    }
                 }
-
-                ahead -= length;
             }
 
             before = (x, y);
@@ -88,3 +87,8 @@ internal sealed class DotGrid
         }
     }
 }
+
+/// <summary>How a line is interrupted, in dots along it.</summary>
+/// <param name="On">Dots drawn, 1 or more.</param>
+/// <param name="Off">Dots left out after them, 0 or more.</param>
+internal readonly record struct Stroke(int On, int Off);

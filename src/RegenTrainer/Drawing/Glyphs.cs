@@ -43,6 +43,7 @@ internal sealed class Glyphs
         Marker = "\u25b2",
         Rule = "\u2500",
         Tick = "\u2534",
+        Upright = "\u2502",
         OpenPage = "\u25b8",
     };
 
@@ -63,6 +64,7 @@ internal sealed class Glyphs
         Marker = "^",
         Rule = "\u2500",
         Tick = "\u2534",
+        Upright = "\u2502",
         OpenPage = ">",
     };
 
@@ -95,6 +97,7 @@ internal sealed class Glyphs
         Marker = "^",
         Rule = "-",
         Tick = "+",
+        Upright = "|",
         OpenPage = ">",
     };
 
@@ -106,8 +109,14 @@ internal sealed class Glyphs
     /// <summary>Dots of a plot in one cell, one above the other.</summary>
     public int DotsDown { get; }
 
-    /// <summary>Dots from one to the next of a dotted curve.</summary>
-    public int DotSpacing => Set == GlyphSet.Braille ? 4 : 2;
+    /// <summary>An uninterrupted curve.</summary>
+    public Stroke Solid { get; } = new(1, 0);
+
+    /// <summary>A dotted curve.</summary>
+    public Stroke Dotted => Set == GlyphSet.Braille ? new(1, 3) : new(1, 1);
+
+    /// <summary>A dashed curve.</summary>
+    public Stroke Dashed => Set == GlyphSet.Braille ? new(6, 4) : new(3, 2);
 
     /// <summary>Under the curve, where the programme's sidebands are.</summary>
     public required string Shade { get; init; }
@@ -130,6 +139,9 @@ internal sealed class Glyphs
     public required string Rule { get; init; }
 
     public required string Tick { get; init; }
+
+    /// <summary>An upright line: the cursor of a plot.</summary>
+    public required string Upright { get; init; }
 
     public required string OpenPage { get; init; }
 

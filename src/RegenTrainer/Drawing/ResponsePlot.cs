@@ -72,7 +72,7 @@ internal static class ResponsePlot
         {
             var dotted = new DotGrid(plot.Width, plot.Height, canvas.Glyphs);
             double center = earlier.Reading.Setting.StationHz;
-            dotted.Dotted(earlier.Curve.Select(point => (ToX(point.FrequencyHz - center), ToY(point.GainDb))), canvas.Glyphs.DotSpacing);
+            dotted.Line(earlier.Curve.Select(point => (ToX(point.FrequencyHz - center), ToY(point.GainDb))), canvas.Glyphs.Dotted);
             dotted.CopyTo(canvas, plot.Left, plot.Top, ink);
         }
 

@@ -30,7 +30,7 @@ internal sealed class BenchScreen : Runnable
     public BenchScreen(Bench bench, Glyphs glyphs, Theme theme)
     {
         (_bench, _glyphs, _theme) = (bench, glyphs, theme);
-        _pages = [new StageView(bench)];
+        _pages = [new StageView(bench), new DialView(bench), new SidebandsView(bench)];
         _page = _pages[0];
         (Width, Height, CanFocus) = (Dim.Fill(), Dim.Fill(), true);
         MousePositionTracking = false;
@@ -171,7 +171,7 @@ internal sealed class BenchScreen : Runnable
 
         if (character == 'p')
         {
-            _bench.TogglePin(ResponsePoints(BenchFrame.Middle(Viewport.Width, Viewport.Height)));
+            _bench.TogglePin(_pages[0].ResponsePoints(BenchFrame.Middle(Viewport.Width, Viewport.Height), _glyphs));
             return true;
         }
 
