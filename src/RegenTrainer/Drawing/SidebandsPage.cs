@@ -41,7 +41,7 @@ internal static class SidebandsPage
         }
 
         var table = new Region(region.Right - TableWidth, region.Top + 1, TableWidth, region.Height - 1);
-        Table(canvas, table, stage, picture);
+        Table(canvas, table, stage);
     }
 
     private static void Plot(Canvas canvas, Region region, SidebandsPicture picture)
@@ -72,7 +72,7 @@ internal static class SidebandsPage
     private static PlotCurve Curve(string name, Ink ink, Stroke stroke, IReadOnlyList<Sideband> curve, Func<Sideband, double> value) =>
         new(name, ink, stroke, [.. curve.Select(s => (s.AudioHz, (double?)value(s)))]);
 
-    private static void Table(Canvas canvas, Region region, StageSnapshot stage, SidebandsPicture picture)
+    private static void Table(Canvas canvas, Region region, StageSnapshot stage)
     {
         Reading reading = stage.Reading;
         int row = region.Top;
