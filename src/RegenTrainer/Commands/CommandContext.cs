@@ -1,4 +1,5 @@
 using System.CommandLine;
+using RegenTrainer.Files;
 
 namespace RegenTrainer.Commands;
 
@@ -11,10 +12,12 @@ internal sealed record CommandContext(Output Output, TextWriter? ProgressTo)
     public Option<bool> Json { get; } = new("--json") { Description = "The answer as JSON." };
 
     /// <summary>The argument that names a stage.</summary>
-    public static Argument<string> StageArgument() => new("STAGE")
+    public static Argument<string> StageArgument()
     {
-        Description = "A stage file's path or a preset's name.",
-    };
+        var stage = new Argument<string>("STAGE") { Description = "A stage file's path or a preset's name." };
+        stage.CompletionSources.Add([.. Presets.Names]);
+        return stage;
+    }
 
     /// <summary>Hands over an answer in the form asked for.</summary>
     public void Answer(ParseResult line, Func<byte[]> json, Func<string> text)
@@ -39,5 +42,6 @@ internal sealed record CommandContext(Output Output, TextWriter? ProgressTo)
         CoilCommand.Create(this),
         CheckCommand.Create(this),
         PresetsCommand.Create(this),
+        CompletionsCommand.Create(this),
     ];
 }

@@ -47,7 +47,9 @@ internal static class Options
 
     /// <summary>An option that takes one of a few words.</summary>
     public static Option<T?> Choice<T>(string name, IReadOnlyDictionary<string, T> words, string meaning)
-        where T : struct => new(name)
+        where T : struct
+    {
+        var option = new Option<T?>(name)
         {
             HelpName = string.Join('|', words.Keys),
             Description = meaning,
@@ -64,6 +66,10 @@ internal static class Options
                 return null;
             },
         };
+        option.CompletionSources.Clear();
+        option.CompletionSources.Add([.. words.Keys]);
+        return option;
+    }
 
     /// <summary>Text of an argument, fit for a message of one line.</summary>
     public static string Shown(string text) => Printable.Fit(text, 60);

@@ -3,6 +3,7 @@ using RegenTrainer.Core.Devices;
 using RegenTrainer.Core.Quantities;
 using RegenTrainer.Core.Readings;
 using RegenTrainer.Core.Stages;
+using RegenTrainer.Files.Devices;
 
 namespace RegenTrainer.Commands;
 
@@ -45,6 +46,7 @@ internal sealed class SettingOptions
     {
         HelpName = "NAME",
         Description = "Type in the regenerating socket, of the same polarity. Default: the stage's own.",
+        CompletionSources = { DeviceShelf.Shipped.Names.ToArray() },
     };
 
     private readonly Option<Grade?> _grade = Options.Choice(

@@ -38,7 +38,8 @@ internal readonly record struct Axis(double From, double To, bool Logarithmic)
         var marks = new List<double>();
         if (Logarithmic)
         {
-            double[] steps = Math.Log10(high / low) * 3 > most ? [1] : _steps;
+            double decades = Math.Log10(high / low);
+            double[] steps = decades * _steps.Length <= most ? _steps : decades * 2 <= most + 1 ? [1, 3] : [1];
             for (double decade = Math.Pow(10, Math.Floor(Math.Log10(low) + 1e-9)); decade <= high * (1 + 1e-9); decade *= 10)
             {
                 marks.AddRange(steps.Select(step => decade * step).Where(value => value >= low * (1 - 1e-9) && value <= high * (1 + 1e-9)));

@@ -15,8 +15,8 @@ internal sealed record DialPicture(DialCurves? Curves, bool Working, DialCurves?
 /// <summary>Page 2: a figure along the whole dial for weak, typical and strong devices, and all figures under the cursor.</summary>
 internal static class DialPage
 {
-    private const int TableWidth = 36;
-    private const int ColumnWidth = 7;
+    private const int TableWidth = 38;
+    private const int ColumnWidth = 8;
     private const int Gap = 2;
 
     /// <summary>Draws the page.</summary>
