@@ -11,12 +11,6 @@ namespace RegenTrainer.Core.Readings;
 /// <summary>Fills a reading whose tank was found.</summary>
 internal static class ReadingFigures
 {
-    /// <summary>What a hand near the coil adds across the tuning capacitor, in farad: common practice.</summary>
-    private const double HandFarad = 0.1e-12;
-
-    /// <summary>Depth of modulation at which distortion is looked at: the 30 % of receiver tests (IEC 60315, from memory).</summary>
-    private const double TestDepth = 0.3;
-
     /// <summary>A sideband of this size against the carrier distorts the envelope.</summary>
     private const double DistortingRatio = 0.7;
 
@@ -43,7 +37,7 @@ internal static class ReadingFigures
             GrowthPerSecond = growth,
             EffectiveQ = decays ? mode.Q : null,
             RingTimeSeconds = decays ? -1 / mode.S.Real : null,
-            HandShiftHz = ModeSolver.ByTuning(ws.Circuit, mode.S).Imaginary / (2 * Math.PI) * HandFarad,
+            HandShiftHz = TuningScale.HandShiftHz(ws, mode),
         };
         if (decays)
         {
@@ -80,9 +74,9 @@ internal static class ReadingFigures
         double? worstHarmonic = null;
         foreach (double hz in audioHz)
         {
-            if (TestDepth * sidebands.LargestRatio(hz) > DistortingRatio)
+            if (SidebandResponse.TestDepth * sidebands.LargestRatio(hz) > DistortingRatio)
             {
-                worstHarmonic = Math.Max(worstHarmonic ?? 0, sidebands.SecondHarmonic(hz, TestDepth));
+                worstHarmonic = Math.Max(worstHarmonic ?? 0, sidebands.SecondHarmonic(hz, SidebandResponse.TestDepth));
             }
         }
 
@@ -104,24 +98,11 @@ internal static class ReadingFigures
             StageGainDb = Decibel.FromRatio(Complex.Abs(sidebands.Carrier)),
             BandEdgesHz = edges,
             BandwidthHz = bandwidth,
-            BandwidthDialDegrees = bandwidth is { } b ? DialDegrees(ws, mode, b) : null,
+            BandwidthDialDegrees = bandwidth is { } b ? TuningScale.DialDegrees(ws, mode, b) : null,
             Sidebands = [.. audioHz.Where(hz => hz < reading.Setting.StationHz).Select(sidebands.At)],
             AudioDownHz = (down[0], down[1], down[2]),
             SpeechIndex = SpeechIndex.Of(hz => sidebands.At(hz).AudioDb),
         };
-    }
-
-    /// <summary>A span of frequency in degrees of the tuning capacitor's shaft, by the slope at its present place.</summary>
-    private static double? DialDegrees(StageWorkspace ws, in ModeResult mode, double spanHz)
-    {
-        Controls.VariableCapacitor capacitor = ws.Model.Circuit.Dial.Capacitor;
-        if (capacitor.DegreesAt(mode.TuningFarad) is not { } degrees)
-        {
-            return null;
-        }
-
-        double hzPerDegree = ModeSolver.ByTuning(ws.Circuit, mode.S).Imaginary / (2 * Math.PI) * capacitor.FaradPerDegreeAt(degrees);
-        return hzPerDegree == 0 ? null : spanHz / Math.Abs(hzPerDegree);
     }
 
     private static Reading WithControl(

@@ -58,8 +58,7 @@ public static class StageReader
     /// <param name="hz">Frequencies in Hz, above 0.</param>
     public static IReadOnlyList<ResponsePoint> Response(StageWorkspace ws, Setting setting, IReadOnlyList<double> hz)
     {
-        Position position = Position.Solve(ws, setting, TankHint.None);
-        if (!position.State.Found || !position.Reachable || TankFamily.FastestGrowing(ws, position.Query.DialHz, position.State).Real >= 0)
+        if (TryDecaying(ws, setting) is null)
         {
             return [];
         }
@@ -79,8 +78,7 @@ public static class StageReader
     /// <param name="setting">The setting.</param>
     public static IReadOnlyList<Neighbour> Neighbours(StageWorkspace ws, Setting setting)
     {
-        Position position = Position.Solve(ws, setting, TankHint.None);
-        if (!position.State.Found || !position.Reachable || TankFamily.FastestGrowing(ws, position.Query.DialHz, position.State).Real >= 0)
+        if (TryDecaying(ws, setting) is not { } position)
         {
             return [];
         }
@@ -88,6 +86,45 @@ public static class StageReader
         var sidebands = new SidebandResponse(ws, setting.StationHz ?? position.DialHz);
         double step = ws.Model.Circuit.Dial.StepHz;
         return [.. new[] { -2 * step, -step, step, 2 * step }.Where(o => sidebands.StationHz + o > 0).Select(sidebands.NeighbourAt)];
+    }
+
+    /// <summary>How each of many audio frequencies fares, as a curve; empty above tip-over, out of reach or unsolved.</summary>
+    /// <param name="ws">A workspace of the stage.</param>
+    /// <param name="setting">The setting.</param>
+    /// <param name="audioHz">Audio frequencies in Hz, above 0; those not below the station are left out.</param>
+    public static IReadOnlyList<Sideband> AudioCurve(StageWorkspace ws, Setting setting, IReadOnlyList<double> audioHz)
+    {
+        if (TryDecaying(ws, setting) is not { } position)
+        {
+            return [];
+        }
+
+        var sidebands = new SidebandResponse(ws, setting.StationHz ?? position.DialHz);
+        return [.. audioHz.Where(hz => hz < sidebands.StationHz).Select(sidebands.At)];
+    }
+
+    /// <summary>Audio frequencies at equal ratios, both ends included, as a curve is drawn over a logarithmic axis.</summary>
+    /// <param name="lowHz">Lowest in Hz, above 0.</param>
+    /// <param name="highHz">Highest in Hz, above <paramref name="lowHz"/>.</param>
+    /// <param name="points">How many, 2 or more.</param>
+    /// <exception cref="ArgumentOutOfRangeException">A value lies outside its range.</exception>
+    public static IReadOnlyList<double> SpacedByRatio(double lowHz, double highHz, int points)
+    {
+        Guard.Positive(lowHz, nameof(lowHz));
+        Guard.InRange(highHz, Math.BitIncrement(lowHz), double.MaxValue, nameof(highHz));
+        Guard.InRange(points, 2, int.MaxValue, nameof(points));
+        double[] spaced = [.. Enumerable.Range(0, points).Select(k => lowHz * Math.Pow(highHz / lowHz, k / (points - 1.0)))];
+        spaced[^1] = highHz;
+        return spaced;
+    }
+
+    /// <summary>The position of a setting at which a response exists; null above tip-over, out of reach or unsolved.</summary>
+    internal static Position? TryDecaying(StageWorkspace ws, Setting setting)
+    {
+        Position position = Position.Solve(ws, setting, TankHint.None);
+        bool decays = position.State.Found && position.Reachable
+            && TankFamily.FastestGrowing(ws, position.Query.DialHz, position.State).Real < 0;
+        return decays ? position : null;
     }
 
     internal static SettingInForce InForce(StageModel model, Setting setting, in Position position) => new(
@@ -115,7 +152,7 @@ public static class StageReader
         };
     }
 
-    private static Caution OutOfReach(StageWorkspace ws, in Position position)
+    internal static Caution OutOfReach(StageWorkspace ws, in Position position)
     {
         Controls.VariableCapacitor capacitor = ws.Model.Circuit.Dial.Capacitor;
         string Say(double? hz) => hz is { } value ? QuantityText.Write(value, Unit.Hertz, 4) : "unknown";

@@ -10,6 +10,9 @@ namespace RegenTrainer.Core.Selectivity;
 /// </summary>
 public readonly record struct SidebandResponse
 {
+    /// <summary>Depth of modulation at which distortion is looked at: the 30 % of receiver tests (IEC 60315, from memory).</summary>
+    public const double TestDepth = 0.3;
+
     private readonly Transfer _transfer;
 
     /// <summary>Looks at a station through the stage in the workspace.</summary>

@@ -30,12 +30,13 @@ internal static class SidebandsCommand
             var workspace = new StageWorkspace(opened.Model);
             Setting asked = setting.Read(line, opened);
             Reading reading = StageReader.Read(workspace, asked, setting.AudioHz(line));
+            Interaction interaction = InteractionReader.Read(workspace, asked, setting.AudioHz(line));
             IReadOnlyList<Neighbour> neighbours = StageReader.Neighbours(workspace, asked);
             IReadOnlyList<ResponsePoint> response = StageReader.Response(workspace, asked, Around(reading.Setting.StationHz));
             context.Answer(
                 line,
-                () => SidebandsJson.Write(opened.Title, reading, neighbours, response),
-                () => SidebandsText.Of(opened.Title, reading, neighbours, response));
+                () => SidebandsJson.Write(opened.Title, reading, interaction, neighbours, response),
+                () => SidebandsText.Of(opened.Title, reading, interaction, neighbours, response));
             return ExitCode.Done;
         });
         return command;

@@ -52,11 +52,14 @@ public sealed class ReportKeyTests
             Keys(dial.GetProperty("points")[0]));
 
         JsonElement sidebands = Parse(SidebandsJson.Write(
-            "S", SampleAnswers.Full, [new Neighbour(1e4, -28)], [new ResponsePoint(1e6, 31, -5)]));
+            "S", SampleAnswers.Full, SampleAnswers.Interaction, [new Neighbour(1e4, -28)], [new ResponsePoint(1e6, 31, -5)]));
         Assert.Equal(
             Head + "effective_q bandwidth_hz tank_hz stage_gain_db regime reachable speech_index audio_3db_hz audio_6db_hz "
-            + "audio_10db_hz sidebands neighbours response",
+            + "audio_10db_hz sidebands neighbours approach_from_percent approach_to_percent approach_from_stop approach_pull_hz "
+            + "repeak_farad repeak_degrees bandwidth_dial_degrees vernier_ratio hand_shift_hz station_offset_hz carrier_loss_db "
+            + "off_tune response",
             Keys(sidebands));
+        Assert.Equal("audio_hz asymmetry_db second_harmonic_percent", Keys(sidebands.GetProperty("off_tune")[0]));
         Assert.Equal("offset_hz relative_db", Keys(sidebands.GetProperty("neighbours")[0]));
         Assert.Equal("frequency_hz gain_db phase_degrees", Keys(sidebands.GetProperty("response")[0]));
 

@@ -62,6 +62,16 @@ internal static class SampleAnswers
         TipOver = new TipOver(TipOverState.Always, []),
     };
 
+    public static readonly Interaction Interaction = new()
+    {
+        Approach = new ApproachToTipOver(53.4, 63.4, FromStop: false, -810, -2e-13, -0.1),
+        BandwidthDialDegrees = 0.3,
+        VernierRatio = 1.7,
+        HandShiftHz = -300,
+        Station = new StationFit(3000, -17, [new OffTuneAudio(1000, 4, 12)]),
+        Cautions = [],
+    };
+
     public static readonly BiasReading Bias = new(
         Setting,
         [],
