@@ -31,6 +31,9 @@ public interface IStageSolver
     /// <summary>How audio frequencies in Hz fare; empty above tip-over, out of reach or unsolved.</summary>
     IReadOnlyList<Sideband> Sidebands(Setting setting, IReadOnlyList<double> audioHz);
 
+    /// <summary>How regeneration, dial and station act on each other.</summary>
+    Interaction Interaction(Setting setting);
+
     /// <summary>Everything computed for one setting; where a solve fails the figures are null and a caution says why.</summary>
     Reading Read(Setting setting);
 

@@ -34,7 +34,10 @@ public sealed class StageSolver(StageModel model, IReadOnlyList<double> audioHz)
     public IReadOnlyList<DialPoint> AlongDial(Setting setting, IReadOnlyList<double> dialHz) => StageReader.AlongDial(_workspace, setting, dialHz);
 
     /// <inheritdoc/>
-    public IReadOnlyList<Sideband> Sidebands(Setting setting, IReadOnlyList<double> audioHz) => StageReader.Read(_workspace, setting, audioHz).Sidebands;
+    public IReadOnlyList<Sideband> Sidebands(Setting setting, IReadOnlyList<double> audioHz) => StageReader.AudioCurve(_workspace, setting, audioHz);
+
+    /// <inheritdoc/>
+    public Interaction Interaction(Setting setting) => InteractionReader.Read(_workspace, setting, audioHz);
 
     /// <inheritdoc/>
     public Reading Read(Setting setting) => StageReader.Read(_workspace, setting, audioHz);

@@ -30,6 +30,9 @@ public sealed class MadeUpStage(params (double TravelPercent, bool Upward)[] cro
     /// <summary>Why no operating point is found; null where one is.</summary>
     public string? Failure { get; init; }
 
+    /// <summary>Whether the run along the dial fails by a fault of the program.</summary>
+    public bool Faulty { get; init; }
+
     public IReadOnlyList<Caution> Cautions { get; init; } = [];
 
     public int Reads { get; private set; }
@@ -40,7 +43,9 @@ public sealed class MadeUpStage(params (double TravelPercent, bool Upward)[] cro
 
     public IStageSolver Fork() => this;
 
-    public IReadOnlyList<DialPoint> AlongDial(Setting setting, IReadOnlyList<double> dialHz) =>
+    public IReadOnlyList<DialPoint> AlongDial(Setting setting, IReadOnlyList<double> dialHz) => Faulty
+        ? throw new InvalidOperationException("a fault made up for a test")
+        :
     [
         .. dialHz.Select(hz =>
         {
@@ -59,6 +64,16 @@ public sealed class MadeUpStage(params (double TravelPercent, bool Upward)[] cro
 
     public IReadOnlyList<Sideband> Sidebands(Setting setting, IReadOnlyList<double> audioHz) =>
         LoopGain(setting.TravelPercent) >= 1 ? [] : [.. audioHz.Select(hz => new Sideband(hz, -hz / 400, -hz / 500, -hz / 450))];
+
+    public Interaction Interaction(Setting setting) => new()
+    {
+        Approach = new ApproachToTipOver(50, 60, false, -203, -4e-14, -0.02),
+        BandwidthDialDegrees = 0.08,
+        VernierRatio = 6.25,
+        HandShiftHz = -406,
+        Station = new StationFit(setting.StationInForceHz - setting.DialHz, 0, [new OffTuneAudio(1000, 0, 0)]),
+        Cautions = [],
+    };
 
     public Reading Read(Setting setting)
     {

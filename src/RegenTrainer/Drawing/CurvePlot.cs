@@ -56,7 +56,7 @@ internal sealed record CurvePlot(Axis X, Axis Y, Func<double, string> WriteX, Fu
     {
         Region picture = Picture(region);
         Scales(canvas, region, picture);
-        int column = picture.Left;
+        int column = region.Left;
         foreach (PlotCurve curve in curves)
         {
             Curve(canvas, picture, curve);

@@ -8,7 +8,8 @@ namespace RegenTrainer.Drawing;
 /// <summary>What page 3 shows beside the stage itself.</summary>
 /// <param name="Curve">Both sidebands and what is heard, upward in audio frequency; empty where there is no response.</param>
 /// <param name="Pinned">The same of what is pinned; empty where nothing is.</param>
-internal sealed record SidebandsPicture(IReadOnlyList<Sideband> Curve, IReadOnlyList<Sideband> Pinned);
+/// <param name="Interaction">How regeneration, dial and station act on each other.</param>
+internal sealed record SidebandsPicture(IReadOnlyList<Sideband> Curve, IReadOnlyList<Sideband> Pinned, Interaction Interaction);
 
 /// <summary>Page 3: what the selectivity leaves of the programme at each audio frequency, and how the stage behaves under the hands.</summary>
 internal static class SidebandsPage
@@ -41,7 +42,7 @@ internal static class SidebandsPage
         }
 
         var table = new Region(region.Right - TableWidth, region.Top + 1, TableWidth, region.Height - 1);
-        Table(canvas, table, stage);
+        Table(canvas, table, stage, picture.Interaction);
     }
 
     private static void Plot(Canvas canvas, Region region, SidebandsPicture picture)
@@ -72,7 +73,7 @@ internal static class SidebandsPage
     private static PlotCurve Curve(string name, Ink ink, Stroke stroke, IReadOnlyList<Sideband> curve, Func<Sideband, double> value) =>
         new(name, ink, stroke, [.. curve.Select(s => (s.AudioHz, (double?)value(s)))]);
 
-    private static void Table(Canvas canvas, Region region, StageSnapshot stage)
+    private static void Table(Canvas canvas, Region region, StageSnapshot stage, Interaction interaction)
     {
         Reading reading = stage.Reading;
         int row = region.Top;
@@ -84,15 +85,39 @@ internal static class SidebandsPage
         }
 
         (double? db3, double? db6, double? db10) = reading.AudioDownHz;
-        Line("heard 3 dB down", Figures.Quantity(db3, Unit.Hertz));
-        Line("6, 10 dB down", $"{Figures.Quantity(db6, Unit.Hertz)}, {Figures.Quantity(db10, Unit.Hertz)}");
+        Line("3, 6, 10 dB down", $"{Down(db3)}, {Down(db6)}, {Down(db10)} Hz");
         Line("speech index", reading.SpeechIndex is { } index ? Figures.Fixed(index, "0.00") : Figures.None);
         foreach (Neighbour[] pair in stage.Neighbours.GroupBy(n => Math.Abs(n.OffsetHz)).OrderBy(g => g.Key).Select(g => g.OrderBy(n => n.OffsetHz).ToArray()))
         {
-            Line($"neighbours \u00b1{Figures.Fixed(Math.Abs(pair[0].OffsetHz) / 1e3, "0.##")} kHz", string.Join(", ", pair.Select(n => Figures.Level(n.RelativeDb))));
+            string levels = string.Join(", ", pair.Select(n => Figures.Signed(n.RelativeDb, "0.0")));
+            Line($"neighbours \u00b1{Figures.Fixed(Math.Abs(pair[0].OffsetHz) / 1e3, "0.##")} kHz", levels + " dB");
         }
 
-        Line("hand of 0.1 pF shifts", Figures.Shift(reading.HandShiftHz));
+        if (interaction.Approach is { } approach)
+        {
+            Line(approach.FromStop ? "from stop to tip-over pulls" : "last 10 % of travel pulls", Figures.Shift(approach.PullHz));
+            string degrees = approach.RepeakDegrees is { } angle ? $", {Figures.Signed(angle, "0.000")}\u00b0" : "";
+            Line("re-peaking takes", Figures.Difference(approach.RepeakFarad, Unit.Farad) + degrees);
+        }
+
+        if (interaction.BandwidthDialDegrees is { } span && interaction.VernierRatio is { } ratio)
+        {
+            string wanted = ratio > 1 ? $", vernier {QuantityText.Write(ratio, Unit.None, 2)}:1" : ", no vernier";
+            Line("bandwidth on dial", Figures.Fixed(span, "0.000") + "\u00b0" + wanted);
+        }
+
+        Line("hand of 0.1 pF shifts", Figures.Shift(interaction.HandShiftHz ?? reading.HandShiftHz));
+        if (interaction.Station is { } station)
+        {
+            Line("station off", $"{Figures.Shift(station.OffsetHz)}, carrier {Figures.Signed(station.CarrierLossDb, "0.0")} dB");
+            if (station.Audio.Count > 0)
+            {
+                OffTuneAudio worst = station.Audio.MaxBy(audio => audio.SecondHarmonicPercent);
+                string harmonic = $"{QuantityText.Write(worst.SecondHarmonicPercent, Unit.None, 2)} % of {QuantityText.Write(worst.AudioHz, Unit.Hertz)}";
+                Line("worst second harmonic", worst.SecondHarmonicPercent < 0.05 ? "none" : harmonic);
+            }
+        }
+
         void Line(string label, string figure)
         {
             if (row < region.Bottom)
@@ -102,6 +127,8 @@ internal static class SidebandsPage
             }
         }
     }
+
+    private static string Down(double? hz) => hz is { } value ? Figures.Fixed(value, "0") : Figures.None;
 
     private static void Columns(Canvas canvas, Region region, int row, string label, string[] cells, Ink ink)
     {

@@ -46,6 +46,29 @@ internal sealed class HeadlessTerminal : IDisposable
         Show();
     }
 
+    /// <summary>Lets iterations of the screen's loop pass until something shows, at most some seconds.</summary>
+    public void PressUntil(Func<bool> shown)
+    {
+        bool there = SpinWait.SpinUntil(
+            () =>
+            {
+                Iterate();
+                return shown();
+            },
+            TimeSpan.FromSeconds(20));
+        if (!there)
+        {
+            throw new TimeoutException("it never showed:\n" + Text);
+        }
+    }
+
+    /// <summary>One iteration of the screen's loop without keys.</summary>
+    public void Iterate()
+    {
+        App.RaiseIteration();
+        Show();
+    }
+
     public void Type(string text) => Press([.. text.Select(character => (Key)character)]);
 
     public void Move(int column, int row, MouseFlags flags)

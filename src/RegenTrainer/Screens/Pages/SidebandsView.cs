@@ -1,3 +1,4 @@
+using RegenTrainer.Core.Readings;
 using RegenTrainer.Core.Selectivity;
 using RegenTrainer.Core.Stages;
 using RegenTrainer.Drawing;
@@ -17,7 +18,7 @@ internal sealed class SidebandsView(Bench bench) : IPage
             SidebandsPage.LowestHz * Math.Pow(SidebandsPage.HighestHz / SidebandsPage.LowestHz, k / (double)(Points - 1))),
     ];
 
-    private (IStageSolver Solver, Setting Setting, IReadOnlyList<Sideband> Curve)? _now;
+    private (IStageSolver Solver, Setting Setting, IReadOnlyList<Sideband> Curve, Interaction Interaction)? _now;
     private (PinnedStage Pinned, IReadOnlyList<Sideband> Curve)? _pinned;
 
     /// <inheritdoc/>
@@ -33,8 +34,11 @@ internal sealed class SidebandsView(Bench bench) : IPage
     public int ResponsePoints(Region region, Glyphs glyphs) => 2;
 
     /// <inheritdoc/>
-    public void Draw(Canvas canvas, Region region, StageSnapshot stage) =>
-        SidebandsPage.Draw(canvas, region, stage, new SidebandsPicture(Now(stage), OfPinned()));
+    public void Draw(Canvas canvas, Region region, StageSnapshot stage)
+    {
+        (IReadOnlyList<Sideband> curve, Interaction interaction) = Now(stage);
+        SidebandsPage.Draw(canvas, region, stage, new SidebandsPicture(curve, OfPinned(), interaction));
+    }
 
     /// <inheritdoc/>
     public bool Press(Key key) => false;
@@ -45,15 +49,15 @@ internal sealed class SidebandsView(Bench bench) : IPage
     /// <inheritdoc/>
     public bool Poll() => false;
 
-    private IReadOnlyList<Sideband> Now(StageSnapshot stage)
+    private (IReadOnlyList<Sideband> Curve, Interaction Interaction) Now(StageSnapshot stage)
     {
         IStageSolver solver = bench.Stage.Solver;
         if (_now is not { } now || now.Solver != solver || now.Setting != stage.Setting)
         {
-            _now = now = (solver, stage.Setting, solver.Sidebands(stage.Setting, _audioHz));
+            _now = now = (solver, stage.Setting, solver.Sidebands(stage.Setting, _audioHz), solver.Interaction(stage.Setting));
         }
 
-        return now.Curve;
+        return (now.Curve, now.Interaction);
     }
 
     private IReadOnlyList<Sideband> OfPinned()
