@@ -1,6 +1,5 @@
 using RegenTrainer.Core.Devices;
 using RegenTrainer.Core.Readings;
-using RegenTrainer.Core.Stages;
 
 namespace RegenTrainer.Session;
 
@@ -9,7 +8,6 @@ namespace RegenTrainer.Session;
 /// <param name="Points">Its points, upward in frequency; the same frequencies for every grade.</param>
 public sealed record DialCurve(Grade Grade, IReadOnlyList<DialPoint> Points);
 
-/// <summary>The runs along the dial for every grade there is, as they stood at one moment; immutable.</summary>
-/// <param name="Setting">The setting they belong to; its dial, station and grade are of no account.</param>
+/// <summary>The runs along the dial for every grade there is; immutable.</summary>
 /// <param name="Curves">Weak, typical and strong; the typical alone where the stage has no device that comes in grades.</param>
-public sealed record DialCurves(Setting Setting, IReadOnlyList<DialCurve> Curves);
+public sealed record DialCurves(IReadOnlyList<DialCurve> Curves);

@@ -13,7 +13,7 @@ public sealed class DialSweepTests
     [Fact]
     public void A_run_has_both_ends_of_the_band_and_every_grade()
     {
-        DialCurves curves = DialSweep.Run(new MadeUpStage((60, true)), new Setting(1e6, 40));
+        DialCurves curves = DialSweep.Run(new(new MadeUpStage((60, true)), new Setting(1e6, 40)));
         Assert.Equal([Grade.Weak, Grade.Typical, Grade.Strong], curves.Curves.Select(c => c.Grade));
         Assert.All(curves.Curves, curve =>
         {
@@ -25,14 +25,14 @@ public sealed class DialSweepTests
 
     [Fact]
     public void A_stage_without_a_device_has_one_curve() =>
-        Assert.Equal(Grade.Typical, Assert.Single(DialSweep.Run(new MadeUpStage((60, true)) { Device = null }, new Setting(1e6, 40)).Curves).Grade);
+        Assert.Equal(Grade.Typical, Assert.Single(DialSweep.Run(new(new MadeUpStage((60, true)) { Device = null }, new Setting(1e6, 40))).Curves).Grade);
 
     // A property: the figures under the cursor are those of a reading with the hands there.
     [Fact]
     public void Points_equal_readings_there()
     {
         var solver = new StageSolver(StageModel.Compile(Presets.Read(Presets.Default)), [1000]);
-        DialCurves curves = DialSweep.Run(solver, new Setting(1e6, 45) { SupplyVolt = 2.8 });
+        DialCurves curves = DialSweep.Run(new(solver, new Setting(1e6, 45) { SupplyVolt = 2.8 }));
         foreach (DialCurve curve in curves.Curves)
         {
             foreach (DialPoint point in curve.Points.Where((_, k) => k % 20 == 0))
@@ -48,25 +48,25 @@ public sealed class DialSweepTests
     public void The_newest_request_is_worked_out_last_and_asked_once()
     {
         var stage = new MadeUpStage((60, true));
-        var sweep = new DialSweep();
+        var sweep = new LatestRequest<StageRequest, DialCurves>(DialSweep.Run);
         for (int k = 0; k <= 50; k++)
         {
-            sweep.Ask(stage, new Setting(1e6, k));
+            sweep.Ask(DialSweep.Request(stage, new Setting(1e6, k)));
         }
 
-        Assert.True(SpinWait.SpinUntil(() => sweep.Poll() && !sweep.IsWorking && sweep.Latest?.Setting.TravelPercent == 50, _patience));
-        DialCurves last = sweep.Latest!;
-        sweep.Ask(stage, new Setting(700e3, 50) { StationHz = 710e3, Grade = Grade.Strong });
+        Assert.True(SpinWait.SpinUntil(() => sweep.Poll() && !sweep.IsWorking && sweep.Latest?.Request.Setting.TravelPercent == 50, _patience));
+        DialCurves last = sweep.Latest!.Value.Answer;
+        sweep.Ask(DialSweep.Request(stage, new Setting(700e3, 50) { StationHz = 710e3, Grade = Grade.Strong }));
         Assert.False(sweep.IsWorking, "dial, station and grade are of no account");
-        Assert.Same(last, sweep.Latest);
+        Assert.Same(last, sweep.Latest!.Value.Answer);
         Assert.False(sweep.Poll());
     }
 
     [Fact]
     public void A_fault_of_the_program_comes_to_the_thread_that_polls()
     {
-        var sweep = new DialSweep();
-        sweep.Ask(new MadeUpStage((60, true)) { Faulty = true }, new Setting(1e6, 40));
+        var sweep = new LatestRequest<StageRequest, DialCurves>(DialSweep.Run);
+        sweep.Ask(new StageRequest(new MadeUpStage((60, true)) { Faulty = true }, new Setting(1e6, 40)));
         Assert.True(SpinWait.SpinUntil(() => !sweep.IsWorking, _patience));
         AggregateException fault = Assert.Throws<AggregateException>(() => sweep.Poll());
         Assert.Contains(fault.Flatten().InnerExceptions, e => e is InvalidOperationException);
@@ -76,6 +76,6 @@ public sealed class DialSweepTests
     [Fact]
     public void States_along_the_dial_are_those_of_the_stage() =>
         Assert.All(
-            DialSweep.Run(new MadeUpStage { WithoutCrossings = TipOverState.Always }, new Setting(1e6, 40)).Curves[0].Points.Where(p => p.Reachable),
+            DialSweep.Run(new(new MadeUpStage { WithoutCrossings = TipOverState.Always }, new Setting(1e6, 40))).Curves[0].Points.Where(p => p.Reachable),
             point => Assert.Equal(TipOverState.Always, point.TipOver!.State));
 }

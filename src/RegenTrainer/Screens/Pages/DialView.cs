@@ -9,8 +9,8 @@ internal sealed class DialView(Bench bench) : IPage
 {
     private const int PageSteps = 10;
 
-    private readonly DialSweep _sweep = new();
-    private readonly DialSweep _pinnedSweep = new();
+    private readonly LatestRequest<StageRequest, DialCurves> _sweep = new(DialSweep.Run);
+    private readonly LatestRequest<StageRequest, DialCurves> _pinnedSweep = new(DialSweep.Run);
     private int _quantity;
     private int? _cursor;
 
@@ -30,10 +30,10 @@ internal sealed class DialView(Bench bench) : IPage
     /// <inheritdoc/>
     public void Draw(Canvas canvas, Region region, StageSnapshot stage)
     {
-        _sweep.Ask(bench.Stage.Solver, stage.Setting);
+        _sweep.Ask(DialSweep.Request(bench.Stage.Solver, stage.Setting));
         if (bench.Pinned is { } pinned)
         {
-            _pinnedSweep.Ask(pinned.Solver, pinned.Stage.Setting);
+            _pinnedSweep.Ask(DialSweep.Request(pinned.Solver, pinned.Stage.Setting));
         }
 
         DialPage.Draw(canvas, region, stage, Picture());
@@ -49,7 +49,7 @@ internal sealed class DialView(Bench bench) : IPage
             return true;
         }
 
-        if (_sweep.Latest is not { } curves)
+        if (_sweep.Latest?.Answer is not { } curves)
         {
             return false;
         }
@@ -84,9 +84,9 @@ internal sealed class DialView(Bench bench) : IPage
 
     private DialPicture Picture()
     {
-        DialCurves? curves = _sweep.Latest;
+        DialCurves? curves = _sweep.Latest?.Answer;
         return new DialPicture(
-            curves, _sweep.IsWorking, bench.Pinned is null ? null : _pinnedSweep.Latest, _quantity, curves is null ? 0 : Cursor(curves));
+            curves, _sweep.IsWorking, bench.Pinned is null ? null : _pinnedSweep.Latest?.Answer, _quantity, curves is null ? 0 : Cursor(curves));
     }
 
     /// <summary>The point under the cursor; the nearest to the dial until it is moved.</summary>
