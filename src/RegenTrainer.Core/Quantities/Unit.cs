@@ -47,4 +47,7 @@ public enum Unit
 
     /// <summary>A level or gain in decibels.</summary>
     Decibel,
+
+    /// <summary>Charge of a battery in ampere-hours, not coulomb.</summary>
+    AmpereHour,
 }

@@ -22,6 +22,7 @@ internal static class UnitSigns
         [Unit.Second] = new("second", "a time such as 20 ms", "s", null, ["s", "second", "seconds"]),
         [Unit.Siemens] = new("siemens", "a conductance such as 40 mS", "S", null, ["S", "siemens"]),
         [Unit.Decibel] = new("decibel", "a level such as -6 dB", "dB", null, ["dB", "db", "DB", "decibel", "decibels"]),
+        [Unit.AmpereHour] = new("ampere-hour", "a charge such as 2 Ah", "Ah", null, ["Ah", "ampere-hour", "ampere-hours"]),
     };
 
     /// <summary>The name in the singular, for messages.</summary>

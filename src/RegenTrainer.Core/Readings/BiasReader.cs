@@ -9,20 +9,14 @@ namespace RegenTrainer.Core.Readings;
 /// <summary>Reads the operating point in the builder's terms.</summary>
 public static class BiasReader
 {
-    /// <summary>A collector within this many volt of its emitter is saturated: common practice.</summary>
-    private const double SaturatedBelowVolt = 0.2;
-
-    /// <summary>The operating point at a setting.</summary>
+    /// <summary>The operating point at a setting, what it draws and how it drifts; how far it can be driven is <see cref="HeadroomReader"/>'s.</summary>
     /// <param name="ws">A workspace of the stage.</param>
     /// <param name="setting">The setting.</param>
     public static BiasReading Read(StageWorkspace ws, Setting setting)
     {
         Workspace w = ws.Circuit;
         StageModel model = ws.Model;
-        TankQuery query = Position.QueryOf(setting, model.ControlLaw?.ValueAt(setting.TravelPercent) ?? 0);
-        w.Values.SetConditions(query.ConditionsAt(setting.DialHz));
-        w.Values.SetDirect(query.ControlValue, regeneratingRemoved: false);
-        OperatingPoint bias = OperatingPointSolver.Solve(w, regeneratingRemoved: false, fromVoltages: false);
+        OperatingPoint bias = BatteryReader.Solve(ws, setting, out TankQuery query);
         var cautions = new List<Caution>();
         var position = new Position(query, new TankState(bias, default), setting.DialHz, Reachable: true);
         SettingInForce inForce = StageReader.InForce(model, setting, position);
@@ -34,7 +28,14 @@ public static class BiasReader
 
         DeviceBias[] devices = [.. Enumerable.Range(0, model.Network.Devices.Count).Select(d => Device(w, d, setting, cautions))];
         (string, double)[] nodes = [.. model.Network.NodeNames.Select(n => (n, w.Voltages[model.Network.NodeIndex(n)]))];
-        return new BiasReading(inForce, cautions, devices, nodes, SupplyAmpere(w), bias.ResidualAmpere);
+        double? supply = BatteryReader.Ampere(w);
+        (BiasDrift? perKelvin, BiasDrift? perTenthVolt) = DriftReader.Read(ws, setting);
+        return new BiasReading(inForce, cautions, devices, nodes, supply, bias.ResidualAmpere)
+        {
+            Battery = BatteryReader.TryRead(ws, setting),
+            PerKelvin = perKelvin,
+            PerTenthVolt = perTenthVolt,
+        };
     }
 
     private static DeviceBias Device(Workspace w, int d, Setting setting, List<Caution> cautions)
@@ -47,7 +48,7 @@ public static class BiasReader
         double baseEmitter = sign * (At(stamp.Control) - At(stamp.Common)), collectorEmitter = sign * (At(stamp.Output) - At(stamp.Common));
         double collector = sign * p.I2, basis = sign * p.I1;
         double dissipation = (collector * collectorEmitter) + (basis * baseEmitter);
-        bool saturated = collectorEmitter < SaturatedBelowVolt;
+        bool saturated = collectorEmitter < HeadroomReader.SaturatedBelowVolt;
         if (saturated)
         {
             cautions.Add(new Caution("saturated", $"{stamp.Part.Name} is saturated: its collector stands {QuantityText.Write(collectorEmitter, Unit.Volt)} above its emitter"));
@@ -77,20 +78,5 @@ public static class BiasReader
         Check(volt, rating.CollectorVolt, Unit.Volt, "collector voltage");
         Check(collector, rating.CollectorAmpere, Unit.Ampere, "collector current");
         Check(watt, rating.DissipationWatt, Unit.Watt, "dissipation");
-    }
-
-    private static double? SupplyAmpere(Workspace w)
-    {
-        double? sum = null;
-        foreach (BranchStamp branch in w.Network.Branches)
-        {
-            if (branch.Kind == BranchKind.Supply)
-            {
-                double drawn = -w.Voltages[branch.Unknown] / Network.CurrentScaleOhm;
-                sum = (sum ?? 0) + (branch.Volt < 0 ? -drawn : drawn);
-            }
-        }
-
-        return sum;
     }
 }

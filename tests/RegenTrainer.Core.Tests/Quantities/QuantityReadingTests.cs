@@ -67,6 +67,8 @@ public class QuantityReadingTests
     [InlineData("270\u00b0", Unit.Degree, 270.0)]
     [InlineData("-6 dB", Unit.Decibel, -6.0)]
     [InlineData("40 mS", Unit.Siemens, 0.04)]
+    [InlineData("2 Ah", Unit.AmpereHour, 2.0)]
+    [InlineData("850 mAh", Unit.AmpereHour, 0.85)]
     [InlineData("20 ms", Unit.Second, 0.02)]
     [InlineData("4V7", Unit.Volt, 4.7)]
     [InlineData("3.0", Unit.Volt, 3.0)]

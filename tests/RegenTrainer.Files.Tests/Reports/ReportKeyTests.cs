@@ -63,11 +63,19 @@ public sealed class ReportKeyTests
         Assert.Equal("offset_hz relative_db", Keys(sidebands.GetProperty("neighbours")[0]));
         Assert.Equal("frequency_hz gain_db phase_degrees", Keys(sidebands.GetProperty("response")[0]));
 
-        JsonElement bias = Parse(BiasJson.Write("S", SampleAnswers.Bias));
-        Assert.Equal(Head + "devices nodes supply_ampere residual_ampere", Keys(bias));
+        JsonElement bias = Parse(BiasJson.Write("S", SampleAnswers.Bias, SampleAnswers.Headroom));
+        Assert.Equal(
+            Head + "devices nodes supply_ampere residual_ampere first_limit_device first_limit first_limit_antenna_volt "
+            + "first_limit_tank_volt first_limit_output_volt supply_fresh_ampere supply_tired_ampere battery_life_s per_kelvin "
+            + "per_tenth_volt",
+            Keys(bias));
+        Assert.Equal("collector_ampere tip_over_percent effective_q tank_hz", Keys(bias.GetProperty("per_kelvin")));
+        Assert.Equal(Keys(bias.GetProperty("per_kelvin")), Keys(bias.GetProperty("per_tenth_volt")));
+        Assert.Equal("saturation", bias.GetProperty("first_limit").GetString());
         Assert.Equal(
             "name type collector_ampere base_ampere base_emitter_volt collector_emitter_volt transconductance_siemens "
-            + "current_gain dissipation_watt saturated",
+            + "current_gain dissipation_watt saturated cut_off_antenna_volt cut_off_tank_volt cut_off_output_volt "
+            + "saturation_antenna_volt saturation_tank_volt saturation_output_volt",
             Keys(bias.GetProperty("devices")[0]));
         Assert.Equal("node volt", Keys(bias.GetProperty("nodes")[0]));
 

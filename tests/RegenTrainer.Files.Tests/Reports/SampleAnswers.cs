@@ -78,7 +78,16 @@ internal static class SampleAnswers
         [new DeviceBias("main", "BC547B", 1.4e-3, 5e-6, 0.64, 1.9, 0.054, 280, 2.7e-3, false)],
         [("collector", 1.9)],
         1.6e-3,
-        1e-17);
+        1e-17)
+    {
+        Battery = new BatteryLife(3.2, 2.2, 1.7e-3, 1.1e-3, 5e6),
+        PerKelvin = new BiasDrift(2e-6, -0.02, 3, -1),
+    };
+
+    public static readonly HeadroomReading Headroom = new(
+        [new DeviceHeadroom("main", null, new LimitLevel(0.1, 3, 0.25))],
+        new FirstLimit("main", DeviceLimit.Saturation, new LimitLevel(0.1, 3, 0.25)),
+        []);
 
     public static readonly CoilReading Coil = new(
         1e6,

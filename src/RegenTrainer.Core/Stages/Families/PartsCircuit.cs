@@ -19,6 +19,7 @@ public sealed class PartsCircuit : Family
                 .. DialFields.Band,
                 .. PotentiometerFields.With(required: false),
                 .. FactorFields.With(null),
+                BiasFields.Battery,
                 .. RangeFields.Supply,
                 .. RangeFields.Temperature,
                 .. ToleranceFields.All,

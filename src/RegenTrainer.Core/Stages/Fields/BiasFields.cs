@@ -1,4 +1,5 @@
 using RegenTrainer.Core.Circuits;
+using RegenTrainer.Core.Quantities;
 using RegenTrainer.Core.Stages.Expansion;
 
 namespace RegenTrainer.Core.Stages.Fields;
@@ -17,6 +18,9 @@ public static class BiasFields
 
     /// <summary>Internal resistance of the supply.</summary>
     public const string SupplyResistance = "bias.supply_resistance";
+
+    /// <summary>Charge of the battery.</summary>
+    public const string BatteryCapacity = "bias.battery_capacity";
 
     /// <summary>Capacitor across the supply.</summary>
     public const string Decoupling = "bias.decoupling";
@@ -40,11 +44,16 @@ public static class BiasFields
         FieldOf.Device(FollowerDevice, "device of the output follower"),
     ];
 
+    /// <summary>The battery behind the supply.</summary>
+    public static Field Battery { get; } =
+        new(BatteryCapacity, "charge of the battery; its life is told where it is given", FieldKind.Quantity, Unit.AmpereHour, 1e-3, 1e3);
+
     /// <summary>The feed, in the order of the documentation.</summary>
     public static IReadOnlyList<Field> Feed { get; } =
     [
         FieldOf.Voltage(Supply, "supply voltage, without sign") with { Required = true },
         FieldOf.SeriesResistance(SupplyResistance, "internal resistance of the supply") with { Default = 0 },
+        Battery,
         FieldOf.Capacitance(Decoupling, "capacitor across the supply; none where not given"),
         FieldOf.Resistance(CollectorResistor, "resistor from the supply to the collector") with { Required = true },
         FieldOf.Resistance(BaseResistor, "resistor from the collector to the base") with { Required = true },
