@@ -34,6 +34,12 @@ public interface IStageSolver
     /// <summary>How regeneration, dial and station act on each other.</summary>
     Interaction Interaction(Setting setting);
 
+    /// <summary>The operating point.</summary>
+    BiasReading Bias(Setting setting);
+
+    /// <summary>How far the stage can be driven.</summary>
+    HeadroomReading Headroom(Setting setting);
+
     /// <summary>Everything computed for one setting; where a solve fails the figures are null and a caution says why.</summary>
     Reading Read(Setting setting);
 

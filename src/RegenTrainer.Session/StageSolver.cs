@@ -40,6 +40,12 @@ public sealed class StageSolver(StageModel model, IReadOnlyList<double> audioHz)
     public Interaction Interaction(Setting setting) => InteractionReader.Read(_workspace, setting, audioHz);
 
     /// <inheritdoc/>
+    public BiasReading Bias(Setting setting) => BiasReader.Read(_workspace, setting);
+
+    /// <inheritdoc/>
+    public HeadroomReading Headroom(Setting setting) => HeadroomReader.Read(_workspace, setting);
+
+    /// <inheritdoc/>
     public Reading Read(Setting setting) => StageReader.Read(_workspace, setting, audioHz);
 
     /// <inheritdoc/>

@@ -75,6 +75,11 @@ public sealed class MadeUpStage(params (double TravelPercent, bool Upward)[] cro
         Cautions = [],
     };
 
+    public BiasReading Bias(Setting setting) => new(
+        Read(setting).Setting, [], [new DeviceBias("main", "BC547B", 3.7e-4, 1.5e-6, 0.62, 2.1, 0.0145, 248, 7.7e-4, false)], [("collector", 2.7)], 1.3e-3, 0);
+
+    public HeadroomReading Headroom(Setting setting) => new([], null, []);
+
     public Reading Read(Setting setting)
     {
         Reads++;

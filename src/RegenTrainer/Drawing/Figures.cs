@@ -42,6 +42,9 @@ internal static class Figures
     public static string Shift(double? hz) =>
         hz is { } v ? (v > 0 ? "+" : "") + QuantityText.Write(v, Unit.Hertz).Replace('-', '\u2212') : None;
 
+    /// <summary>A shift of frequency in two figures.</summary>
+    public static string ShiftShort(double hz) => (hz > 0 ? "+" : "") + QuantityText.Write(hz, Unit.Hertz, 2).Replace('-', '\u2212');
+
     /// <summary>A frequency as a dial shows it: in kHz, with so many decimals at most.</summary>
     public static string Dial(double hz, int decimals = 3)
     {

@@ -30,7 +30,7 @@ internal sealed class BenchScreen : Runnable
     public BenchScreen(Bench bench, Glyphs glyphs, Theme theme)
     {
         (_bench, _glyphs, _theme) = (bench, glyphs, theme);
-        _pages = [new StageView(bench), new DialView(bench), new SidebandsView(bench)];
+        _pages = [new StageView(bench), new DialView(bench), new SidebandsView(bench), new BiasView(bench)];
         _page = _pages[0];
         (Width, Height, CanFocus) = (Dim.Fill(), Dim.Fill(), true);
         MousePositionTracking = false;
