@@ -36,6 +36,8 @@ public sealed class MadeUpStage(params (double TravelPercent, bool Upward)[] cro
 
     public int RegimeRuns { get; private set; }
 
+    public Setting Fit(Setting setting) => SupplyVolt is null ? setting with { SupplyVolt = null } : setting;
+
     public Reading Read(Setting setting)
     {
         Reads++;
