@@ -128,6 +128,21 @@ internal sealed class BenchScreen : Runnable
         return taken;
     }
 
+    /// <inheritdoc/>
+    protected override void Dispose(bool disposing)
+    {
+        if (disposing)
+        {
+            Open(null);
+            foreach (IDisposable page in _pages.OfType<IDisposable>())
+            {
+                page.Dispose();
+            }
+        }
+
+        base.Dispose(disposing);
+    }
+
     private bool Press(Key key)
     {
         if (key == Key.Esc)
