@@ -18,7 +18,12 @@ public static class StageFiles
 {
     /// <summary>Opens a stage.</summary>
     /// <param name="pathOrPreset">A path, or the name of a preset; a file of that name wins.</param>
-    public static OpenedFile Open(string pathOrPreset)
+    public static OpenedFile Open(string pathOrPreset) => Open(pathOrPreset, Places.OfUser());
+
+    /// <summary>Opens a stage.</summary>
+    /// <param name="pathOrPreset">A path, or the name of a preset; a file of that name wins.</param>
+    /// <param name="places">Where the user's devices are.</param>
+    public static OpenedFile Open(string pathOrPreset, Places places)
     {
         if (!File.Exists(pathOrPreset) && Presets.Names.Contains(pathOrPreset, StringComparer.Ordinal))
         {
@@ -32,7 +37,7 @@ public static class StageFiles
         }
 
         string folder = Path.GetDirectoryName(Path.GetFullPath(pathOrPreset)) ?? ".";
-        StageReadResult result = StageText.Read(text, pathOrPreset, DeviceShelf.Beside(folder));
+        StageReadResult result = StageText.Read(text, pathOrPreset, DeviceShelf.Beside(folder, places));
         return new OpenedFile(result.Design, text, false, result.Faults, null);
     }
 }

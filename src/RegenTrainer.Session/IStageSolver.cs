@@ -40,6 +40,9 @@ public interface IStageSolver
     /// <summary>How far the stage can be driven.</summary>
     HeadroomReading Headroom(Setting setting);
 
+    /// <summary>A setting without what does not suit this stage: a device of another polarity, a supply where there is none.</summary>
+    Setting Fit(Setting setting);
+
     /// <summary>Everything computed for one setting; where a solve fails the figures are null and a caution says why.</summary>
     Reading Read(Setting setting);
 

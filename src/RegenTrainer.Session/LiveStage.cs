@@ -23,7 +23,7 @@ public sealed class LiveStage
     /// <summary>The dial turns past the ends of the band by this factor, so that the reach of the capacitor can be seen.</summary>
     private const double BeyondBand = 2;
 
-    private readonly IStageSolver _solver;
+    private IStageSolver _solver;
     private Setting _setting;
     private string _notice = "";
     private StageSnapshot? _shown;
@@ -54,6 +54,23 @@ public sealed class LiveStage
 
     /// <summary>What the last method could not do, in words; empty where it did.</summary>
     public string Notice => _notice;
+
+    /// <summary>
+    /// Puts another stage under the hands. They stay where they are, but for what does not suit it; a dial it does not reach
+    /// stays too, and the reading says so.
+    /// </summary>
+    /// <param name="solver">The stage.</param>
+    public void Replace(IStageSolver solver) => Replace(solver, _setting);
+
+    /// <summary>Puts another stage under the hands, and the hands elsewhere.</summary>
+    /// <param name="solver">The stage.</param>
+    /// <param name="setting">Where the hands are from now on, but for what does not suit the stage.</param>
+    public void Replace(IStageSolver solver, Setting setting)
+    {
+        (_solver, _setting) = (solver, solver.Fit(setting));
+        (_notice, _shown, _regimes) = ("", null, null);
+        Reading = solver.Read(Asked(_setting));
+    }
 
     /// <summary>Turns the control by thousandths of a percent, up to its stops.</summary>
     public void TurnControl(int thousandths) => Ask(_setting with { TravelPercent = Steps.Travel(_setting.TravelPercent, thousandths) });

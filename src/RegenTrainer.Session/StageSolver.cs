@@ -1,3 +1,4 @@
+using RegenTrainer.Core.Circuits;
 using RegenTrainer.Core.Readings;
 using RegenTrainer.Core.Selectivity;
 using RegenTrainer.Core.Stages;
@@ -44,6 +45,17 @@ public sealed class StageSolver(StageModel model, IReadOnlyList<double> audioHz)
 
     /// <inheritdoc/>
     public HeadroomReading Headroom(Setting setting) => HeadroomReader.Read(_workspace, setting);
+
+    /// <inheritdoc/>
+    public Setting Fit(Setting setting)
+    {
+        Bipolar? socket = model.Network.Devices.FirstOrDefault(d => d.Regenerating)?.Part;
+        return setting with
+        {
+            Device = setting.Device is { } device && device.Polarity == socket?.Model.Polarity ? device : null,
+            SupplyVolt = SupplyVolt is null ? null : setting.SupplyVolt,
+        };
+    }
 
     /// <inheritdoc/>
     public Reading Read(Setting setting) => StageReader.Read(_workspace, setting, audioHz);

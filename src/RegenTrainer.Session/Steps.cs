@@ -1,3 +1,5 @@
+using RegenTrainer.Core.Stages;
+
 namespace RegenTrainer.Session;
 
 /// <summary>Steps of the hands, so made that many small ones add up exactly.</summary>
@@ -25,6 +27,14 @@ public static class Steps
     {
         double channel = hz / rasterHz;
         return rasterHz * (up ? Math.Floor(channel + OnRaster) + 1 : Math.Ceiling(channel - OnRaster) - 1);
+    }
+
+    /// <summary>The raster frequency nearest to the geometric mean of the band's ends, in Hz.</summary>
+    /// <param name="dial">The dial.</param>
+    public static double MiddleOfBand(Dial dial)
+    {
+        double steps = Math.Round((Math.Sqrt(dial.LowHz * dial.HighHz) - dial.LowHz) / dial.StepHz);
+        return Math.Min(dial.LowHz + (steps * dial.StepHz), dial.HighHz);
     }
 
     /// <summary>A voltage one tenth of a volt up or down, on whole tenths.</summary>

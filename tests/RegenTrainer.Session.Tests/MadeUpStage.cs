@@ -80,6 +80,8 @@ public sealed class MadeUpStage(params (double TravelPercent, bool Upward)[] cro
 
     public HeadroomReading Headroom(Setting setting) => new([], null, []);
 
+    public Setting Fit(Setting setting) => SupplyVolt is null ? setting with { SupplyVolt = null } : setting;
+
     public Reading Read(Setting setting)
     {
         Reads++;

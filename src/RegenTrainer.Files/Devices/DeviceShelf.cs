@@ -21,7 +21,12 @@ public sealed class DeviceShelf : IDeviceSource
 
     /// <summary>A shelf that looks into a folder first, then into the user's, then among those that ship.</summary>
     /// <param name="folder">The folder of the stage file.</param>
-    public static DeviceShelf Beside(string folder) => new(UserFolder() is { } own ? [folder, own] : [folder]);
+    public static DeviceShelf Beside(string folder) => Beside(folder, Places.OfUser());
+
+    /// <summary>A shelf that looks into a folder first, then into the user's, then among those that ship.</summary>
+    /// <param name="folder">The folder of the stage file; null where there is none.</param>
+    /// <param name="places">Where the user's devices are.</param>
+    public static DeviceShelf Beside(string? folder, Places places) => new([.. new[] { folder, places.Devices }.OfType<string>()]);
 
     /// <summary>Every name that can be had, shipped ones first.</summary>
     public IReadOnlyList<string> Names =>
@@ -62,17 +67,6 @@ public sealed class DeviceShelf : IDeviceSource
         {
             return [];   // a folder that cannot be listed has no devices to offer
         }
-    }
-
-    /// <summary>
-    /// The user's devices folder; null where there is no home to have one in. A relative XDG_CONFIG_HOME counts as none
-    /// [XDG Base Directory Specification].
-    /// </summary>
-    private static string? UserFolder()
-    {
-        string? named = Environment.GetEnvironmentVariable("XDG_CONFIG_HOME");
-        string home = Path.IsPathFullyQualified(named ?? "") ? named! : Environment.GetFolderPath(Environment.SpecialFolder.ApplicationData);
-        return home.Length > 0 ? Path.Combine(home, "regentrainer", "devices") : null;
     }
 
     private static Dictionary<string, BipolarModel> ReadShipped()

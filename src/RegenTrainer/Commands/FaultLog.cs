@@ -1,12 +1,13 @@
 using System.Globalization;
 using RegenTrainer.Core.Quantities;
+using RegenTrainer.Files;
+using RegenTrainer.Files.Saving;
 
 namespace RegenTrainer.Commands;
 
 /// <summary>Keeps the particulars of a fault of our own in a file of the user's, so that standard error stays one line.</summary>
 internal static class FaultLog
 {
-    private const string FolderName = "regentrainer";
     private const string FileName = "faults.log";
 
     /// <summary>Writes a fault down.</summary>
@@ -28,34 +29,11 @@ internal static class FaultLog
     }
 
     /// <summary>The folder of the log, made if need be; for the user alone where the system knows modes.</summary>
+    /// <exception cref="DirectoryNotFoundException">The user has no home.</exception>
     private static string Folder()
     {
-        string folder = Path.Combine(StateHome(), FolderName);
-        if (OperatingSystem.IsWindows())
-        {
-            Directory.CreateDirectory(folder);
-        }
-        else
-        {
-            Directory.CreateDirectory(folder, UnixFileMode.UserRead | UnixFileMode.UserWrite | UnixFileMode.UserExecute);
-        }
-
+        string folder = Places.OfUser().State ?? throw new DirectoryNotFoundException("The user has no home.");
+        AtomicFile.MakeOwnFolder(folder);
         return folder;
     }
-
-    /// <summary>XDG Base Directory Specification: an absolute <c>$XDG_STATE_HOME</c>, or <c>~/.local/state</c>.</summary>
-    /// <exception cref="DirectoryNotFoundException">The user has no home.</exception>
-    private static string StateHome()
-    {
-        if (OperatingSystem.IsWindows())
-        {
-            return Place(Environment.SpecialFolder.LocalApplicationData);
-        }
-
-        string? set = Environment.GetEnvironmentVariable("XDG_STATE_HOME");
-        return Path.IsPathRooted(set) ? set : Path.Combine(Place(Environment.SpecialFolder.UserProfile), ".local", "state");
-    }
-
-    private static string Place(Environment.SpecialFolder folder) =>
-        Environment.GetFolderPath(folder) is { Length: > 0 } path ? path : throw new DirectoryNotFoundException("The user has no home.");
 }

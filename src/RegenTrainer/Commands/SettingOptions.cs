@@ -4,6 +4,7 @@ using RegenTrainer.Core.Quantities;
 using RegenTrainer.Core.Readings;
 using RegenTrainer.Core.Stages;
 using RegenTrainer.Files.Devices;
+using RegenTrainer.Session;
 
 namespace RegenTrainer.Commands;
 
@@ -110,12 +111,8 @@ internal sealed class SettingOptions
         };
     }
 
-    /// <summary>The raster frequency nearest to the geometric mean of the band's ends, in Hz.</summary>
-    public static double MiddleOfBandHz(Dial dial)
-    {
-        double steps = Math.Round((Math.Sqrt(dial.LowHz * dial.HighHz) - dial.LowHz) / dial.StepHz);
-        return Math.Min(dial.LowHz + (steps * dial.StepHz), dial.HighHz);
-    }
+    /// <summary>The dial where none is asked for, in Hz.</summary>
+    public static double MiddleOfBandHz(Dial dial) => Steps.MiddleOfBand(dial);
 
     private static BipolarModel Device(string name, OpenedStage stage)
     {
