@@ -69,6 +69,7 @@ public sealed partial class TerminalTests
         { "stage", "1", "effective Q" },
         { "dial", "2", "tips over" },
         { "sidebands", "3", "speech index" },
+        { "bias", "8", "nothing touched" },
     };
 
     [Theory]
@@ -82,8 +83,9 @@ public sealed partial class TerminalTests
         foreach ((int columns, int rows) in new[] { (80, 24), (100, 30), (140, 45) })
         {
             terminal.Resize(columns, rows);
-            Thread.Sleep(700);
             terminal.WaitFor(shown);
+            Thread.Sleep(700);
+            terminal.WaitWithout("...");
             Fits(terminal, columns, rows);
             string screen = string.Join('\n', terminal.Lines);
             Kept.Check(screen, "docs", "screens", $"{name}-{columns}x{rows}.txt");

@@ -65,16 +65,28 @@ internal sealed class Tmux : IDisposable
         do
         {
             screen = Screen;
-            if (screen.Contains(text, StringComparison.Ordinal))
+            Thread.Sleep(50);
+
+            // A frame that is still being written shows old and newer rows: two looks must agree.
+            if (screen.Contains(text, StringComparison.Ordinal) && Screen == screen)
             {
                 return screen;
             }
-
-            Thread.Sleep(50);
         }
         while (clock.Elapsed < _patience);
         Assert.Fail($"the screen never showed \"{text}\":\n{screen}");
         return screen;
+    }
+
+    /// <summary>Waits until the screen no longer holds a text.</summary>
+    public void WaitWithout(string text)
+    {
+        var clock = Stopwatch.StartNew();
+        while (Screen.Contains(text, StringComparison.Ordinal))
+        {
+            Assert.True(clock.Elapsed < _patience, $"the screen kept showing \"{text}\":\n{Screen}");
+            Thread.Sleep(50);
+        }
     }
 
     public void Dispose() => Run("tmux", ["-L", _socket, "kill-server"]);
