@@ -113,7 +113,7 @@ internal static class PartsPage
         Region plot = Plot(region);
         ResponsePlot.Draw(canvas, plot, stage, compared, bare: plot.Height < FullPlotRows);
         Region figures = right with { Top = right.Bottom - Readouts, Width = Math.Min(right.Width, WidestReadouts), Height = Readouts };
-        ReadoutColumn.DrawMain(canvas, figures, stage.Reading, (compared.Before ?? compared.Pinned)?.Reading);
+        ReadoutColumn.DrawChange(canvas, figures, stage.Reading, (compared.Before ?? compared.Pinned)?.Reading);
     }
 
     private static Region Right(Region region)

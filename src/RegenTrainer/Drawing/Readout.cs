@@ -27,7 +27,7 @@ internal sealed record Readout(string Label, double? Value, Func<double?, string
     ];
 
     /// <summary>The figures that tell most of a change of parts, in their order.</summary>
-    public static IReadOnlyList<Readout> Main(Reading reading) =>
+    public static IReadOnlyList<Readout> OfChange(Reading reading) =>
     [
         new("effective Q", reading.EffectiveQ, Figures.Q, Figures.QDifference),
         new(

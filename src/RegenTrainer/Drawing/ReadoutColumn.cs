@@ -13,8 +13,8 @@ internal static class ReadoutColumn
         Draw(canvas, region, reading, pinned, Readout.Of, Ink.Pinned);
 
     /// <summary>Draws the main ones with what has changed since before.</summary>
-    public static void DrawMain(Canvas canvas, Region region, Reading reading, Reading? before) =>
-        Draw(canvas, region, reading, before, Readout.Main, Ink.Label);
+    public static void DrawChange(Canvas canvas, Region region, Reading reading, Reading? before) =>
+        Draw(canvas, region, reading, before, Readout.OfChange, Ink.Label);
 
     private static void Draw(
         Canvas canvas, Region region, Reading reading, Reading? earlier, Func<Reading, IReadOnlyList<Readout>> readouts, Ink difference)

@@ -1,9 +1,9 @@
-using RegenTrainer.Drawing;
 using Terminal.Gui.Drawing;
 using Terminal.Gui.Input;
 using Terminal.Gui.ViewBase;
 using Terminal.Gui.Views;
 using Attribute = Terminal.Gui.Drawing.Attribute;
+using Region = RegenTrainer.Drawing.Region;
 
 namespace RegenTrainer.Screens;
 
