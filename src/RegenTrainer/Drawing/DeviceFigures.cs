@@ -32,7 +32,7 @@ internal static class DeviceFigures
             (string label, string spread, DeviceFigure figure, Unit unit) = figures[k];
             string at = figure.At is { } condition ? " at " + QuantityText.Write(condition, unit) : "";
             canvas.Put(region.Left, region.Top + k, label, Ink.Label, region.Right);
-            canvas.Put(region.Left + NameWidth - 2, region.Top + k, $"{spread}{at} {Known(figure)}", Ink.Text, region.Right);
+            canvas.Put(region.Left + NameWidth - 2, region.Top + k, $"{spread}{at}, {Known(figure)}", Ink.Text, region.Right);
         }
     }
 

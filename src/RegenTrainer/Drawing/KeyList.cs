@@ -34,7 +34,7 @@ internal static class KeyList
 
     private static readonly (string Key, string Does)[] _bench =
     [
-        ("e", "parts: every value of the stage"),
+        ("e", "parts of the stage"),
         ("u r", "undo, redo"),
         ("w W", "save, save as"),
         ("o", "open another stage"),
@@ -48,7 +48,7 @@ internal static class KeyList
     {
         int half = (region.Width - Gap) / 2;
         var left = new Region(region.Left, region.Top, half, region.Height);
-        left = Group(canvas, left, "regeneration control; wheel and drag on the strip", _control);
+        left = Group(canvas, left, "control; wheel and drag on the strip", _control);
         left = Group(canvas, left, "battery, room, device", _conditions);
         Group(canvas, left, "here: " + open, openKeys);
         var right = new Region(region.Left + half + Gap, region.Top, half, region.Height);

@@ -12,9 +12,9 @@ internal static class ReadoutColumn
     public static void Draw(Canvas canvas, Region region, Reading reading, Reading? pinned) =>
         Draw(canvas, region, reading, pinned, Readout.Of, Ink.Pinned);
 
-    /// <summary>Draws the main ones with what has changed since before.</summary>
+    /// <summary>Draws those that tell most of a change of parts, with what it changed; what it did not has nothing beside it.</summary>
     public static void DrawChange(Canvas canvas, Region region, Reading reading, Reading? before) =>
-        Draw(canvas, region, reading, before, Readout.OfChange, Ink.Label);
+        Draw(canvas, region, reading, Equals(before, reading) ? null : before, Readout.OfChange, Ink.Label);
 
     private static void Draw(
         Canvas canvas, Region region, Reading reading, Reading? earlier, Func<Reading, IReadOnlyList<Readout>> readouts, Ink difference)

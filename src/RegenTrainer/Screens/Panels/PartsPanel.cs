@@ -10,7 +10,7 @@ namespace RegenTrainer.Screens.Panels;
 internal sealed class PartsPanel : IPanel
 {
     private const string Hint = "Enter edits  + - step  Delete default  Tab section  u undo  r redo  Esc closes";
-    private const string TypingHint = "Enter takes it, Esc leaves it; nothing typed is the default";
+    private const string TypingHint = "Enter takes it, Esc leaves it; an empty line is the default";
     private const string PickHint = "Enter takes it, Esc leaves it";
 
     private readonly Bench _bench;
@@ -230,7 +230,8 @@ internal sealed class PartsPanel : IPanel
     {
         int at = _place.Selected;
         int[] firsts = [.. Enumerable.Range(1, _rows.Count - 1).Where(k => _rows[k - 1].Field is null)];
-        _place.Selected = forward ? firsts.FirstOrDefault(k => k > at, firsts[0]) : firsts.LastOrDefault(k => k < at, firsts[^1]);
+        int first = forward ? firsts.FirstOrDefault(k => k > at, firsts[0]) : firsts.LastOrDefault(k => k < at, firsts[^1]);
+        _place.SeeFrom(first - 1, first);
     }
 
     /// <summary>A heading is passed over; at the very top there is a heading and nothing above it.</summary>

@@ -24,6 +24,9 @@ internal sealed class Pick(int count, int selected)
         Top = PickList.Top(Top, Math.Max(0, Selected), count, _rows);
     }
 
+    /// <summary>Selects an entry and has the list seen from another on, as far as it reaches.</summary>
+    public void SeeFrom(int top, int selected) => (Top, Selected) = (top, selected);
+
     /// <summary>Moves with Up, Down, PageUp and PageDown; false for any other key.</summary>
     public bool Move(Key key)
     {
