@@ -1,3 +1,4 @@
+using RegenTrainer.Core.Devices;
 using RegenTrainer.Core.Quantities;
 using RegenTrainer.Core.Stages;
 using RegenTrainer.Files;
@@ -81,7 +82,7 @@ public sealed class Workbench : IDisposable
         }
 
         // A value and the condition it holds at make sense together only: they go together.
-        return value is null && Condition(key) is { } at && Design.Gives(at.Key)
+        return value is null && TypedChange.Condition(Design, key) is { } at && Design.Gives(at.Key)
             && FieldCheck.Refusal(at, null) is null && TryChangeTogether([(key, null), (at.Key, null)], out refusal);
     }
 
@@ -115,28 +116,22 @@ public sealed class Workbench : IDisposable
     /// <param name="refusal">The position, what was found and what is expected; empty where it was changed.</param>
     public bool TryType(string key, string text, out string refusal)
     {
-        if (Design.Family.FieldFor(key) is not { } field || text.AsSpan().Trim().IsEmpty)
+        if (!TypedChange.TryRead(Design, key, text, Shelf, out var changes, out _, out refusal))
         {
-            return TryChange(key, null, out refusal);
+            return false;
         }
 
-        string? condition = null;
-        int at = text.IndexOf(" at ", StringComparison.OrdinalIgnoreCase);
-        if (Condition(key) is { } conditionField && at > 0)
-        {
-            (text, condition) = (text[..at], text[(at + 4)..]);
-            if (!TypedValue.TryRead(conditionField, condition, Shelf, out FieldValue? typed, out refusal))
-            {
-                refusal = $"behind \"at\", {refusal}";
-                return false;
-            }
-
-            return TypedValue.TryRead(field, text, Shelf, out FieldValue? first, out refusal)
-                && TryChangeTogether([(key, Keeping(field, first!)), (conditionField.Key, typed)], out refusal);
-        }
-
-        return TypedValue.TryRead(field, text, Shelf, out FieldValue? value, out refusal) && TryChange(key, Keeping(field, value!), out refusal);
+        return changes.Count == 1 ? TryChange(changes[0].Key, changes[0].Value, out refusal) : TryChangeTogether(changes, out refusal);
     }
+
+    /// <summary>Whether <see cref="TryType"/> would take what was typed; nothing changes.</summary>
+    /// <param name="key">The field.</param>
+    /// <param name="text">What was typed so far.</param>
+    /// <param name="character">The first wrong character, counted from 1; null where no single one is wrong.</param>
+    /// <param name="refusal">The position, what was found and what is expected; empty where it can be taken.</param>
+    public bool CanType(string key, string text, out int? character, out string refusal) =>
+        TypedChange.TryRead(Design, key, text, Shelf, out var changes, out character, out refusal)
+        && DesignEdit.TryMake(Design, changes, Shelf, out _, out refusal);
 
     /// <summary>The value in force as it is typed, so that <see cref="TryType"/> reads it as it is; empty where there is none.</summary>
     public string Typed(string key) => Design.Family.FieldFor(key) is { } field && InForce(field) is { } value ? TypedValue.Write(field, value) : "";
@@ -181,7 +176,7 @@ public sealed class Workbench : IDisposable
             return false;
         }
 
-        return TryChange(key, Keeping(field, FieldValue.Of(next)), out refusal);
+        return TryChange(key, TypedChange.Keeping(Design, field, FieldValue.Of(next)), out refusal);
     }
 
     /// <summary>The names on the shelf that can stand in a device field as the design is now.</summary>
@@ -196,6 +191,9 @@ public sealed class Workbench : IDisposable
         DeviceShelf shelf = Shelf;
         return [.. shelf.Names.Where(n => DesignEdit.TryMake(Design, [(key, FieldValue.Of(n))], shelf, out _, out _))];
     }
+
+    /// <summary>A type by its name on the shelf; null where there is none or its file has faults.</summary>
+    public BipolarModel? Device(string name) => Shelf.Find(name)?.Model;
 
     /// <summary>Takes the last step of the design back; knob, dial and supply stay.</summary>
     /// <returns>Whether there was one.</returns>
@@ -333,19 +331,9 @@ public sealed class Workbench : IDisposable
         return false;
     }
 
-    /// <summary>A value with the tolerance its field has been given, unless it brings one of its own.</summary>
-    private FieldValue Keeping(Field field, FieldValue value) =>
-        field.Kind == FieldKind.Quantity && value.TolerancePercent is null && Design.Values.TryGetValue(field.Key, out FieldValue? given)
-            ? value with { TolerancePercent = given.TolerancePercent }
-            : value;
-
     private FieldValue? InForce(Field field) =>
         Design.Values.GetValueOrDefault(field.Key)
         ?? (field.Default is { } number ? FieldValue.Of(number) : field.DefaultText is { } word ? FieldValue.Of(word) : null);
-
-    /// <summary>The field of the condition a value holds at: <c>coil.q.at</c> for <c>coil.q.value</c>.</summary>
-    private Field? Condition(string key) =>
-        key.EndsWith(".value", StringComparison.Ordinal) ? Design.Family.FieldFor(key[..^"value".Length] + "at") : null;
 
     private RecoveryContent Content() => new(
         Document.Name, Document.Path, _around.Clock.GetUtcNow(), _around.Process, _file.Fingerprint, StageText.Write(Document.Text, Design));

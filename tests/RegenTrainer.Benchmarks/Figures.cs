@@ -48,6 +48,9 @@ internal static class Figures
         (double median, double p99, double bytesPerKey) = KeyToFrame.Run();
         Line("key to end of draw at 120x40, median", median, 4000, bytesPerKey);
         Line("key to end of draw at 120x40, 99th percentile", p99, 16000, bytesPerKey);
+        (double stepMedian, double stepP99, double bytesPerStep) = PartsStepToFrame.Run();
+        Line("step of the turns in Parts to end of draw, median", stepMedian, 8000, bytesPerStep);
+        Line("step of the turns in Parts, 99th percentile", stepP99, 32000, bytesPerStep);
         return 0;
 
         void Line(string meaning, double microseconds, double most, double bytes) => output.WriteLine(string.Create(

@@ -9,6 +9,7 @@ internal sealed class Tmux : IDisposable
     private static int _servers;
 
     private readonly string _socket = $"regentrainer-{Environment.ProcessId}-{Interlocked.Increment(ref _servers)}";
+    private readonly string? _ownHome;
 
     /// <summary>Starts the program; the shell says how it ended.</summary>
     /// <param name="columns">Width of the terminal.</param>
@@ -16,13 +17,16 @@ internal sealed class Tmux : IDisposable
     /// <param name="arguments">Arguments of the program, as a shell would take them.</param>
     /// <param name="environment">Assignments before the command, as a shell would take them.</param>
     /// <param name="folder">Folder it is started in.</param>
-    public Tmux(int columns, int rows, string arguments = "", string environment = "", string? folder = null)
+    /// <param name="home">Folder with the user's settings and state; null for one of its own.</param>
+    public Tmux(int columns, int rows, string arguments = "", string environment = "", string? folder = null, string? home = null)
     {
+        _ownHome = home is null ? Directory.CreateTempSubdirectory("regentrainer-home-").FullName : null;
+        string places = home ?? _ownHome!;
         // A session that stays keeps the server alive, whatever the program does to its own.
         Tell("-f", "/dev/null", "new-session", "-d", "-s", "keep", "sleep 600");
         Tell("set", "-g", "escape-time", "0");
         Tell("new-session", "-d", "-x", Text(columns), "-y", Text(rows), "-s", "run", "-c", folder ?? Path.GetTempPath(),
-            $"env TERM=xterm-256color LC_ALL=C.UTF-8 {environment} dotnet {ProgramRun.ProgramPath} {arguments}; echo ENDED=$?; sleep 600");
+            $"env TERM=xterm-256color LC_ALL=C.UTF-8 XDG_STATE_HOME={places}/state XDG_CONFIG_HOME={places}/config {environment} dotnet {ProgramRun.ProgramPath} {arguments}; echo ENDED=$?; sleep 600");
     }
 
     /// <summary>Why these tests cannot run here; null where they can.</summary>
@@ -89,7 +93,21 @@ internal sealed class Tmux : IDisposable
         }
     }
 
-    public void Dispose() => Run("tmux", ["-L", _socket, "kill-server"]);
+    public void Dispose()
+    {
+        Run("tmux", ["-L", _socket, "kill-server"]);
+        try
+        {
+            if (_ownHome is not null)
+            {
+                Directory.Delete(_ownHome, recursive: true);
+            }
+        }
+        catch (IOException)
+        {
+            // The program was still writing there as its terminal went away: a folder of temporary files may stay.
+        }
+    }
 
     private static string Text(int number) => number.ToString(System.Globalization.CultureInfo.InvariantCulture);
 

@@ -13,16 +13,18 @@ public static class TypedValue
     /// <param name="text">What was typed.</param>
     /// <param name="shelf">Where devices are looked up.</param>
     /// <param name="value">The value; null on a refusal.</param>
+    /// <param name="character">The first wrong character, counted from 1; null on success.</param>
     /// <param name="refusal">The character, what was found there and what is expected; empty on success.</param>
-    public static bool TryRead(Field field, string text, DeviceShelf shelf, out FieldValue? value, out string refusal)
+    public static bool TryRead(Field field, string text, DeviceShelf shelf, out FieldValue? value, out int? character, out string refusal)
     {
         ArgumentNullException.ThrowIfNull(text);
-        value = null;
+        (value, character) = (null, null);
         (string plain, string? tolerance) = Split(field, text);
         double percent = 0;
         if (tolerance is not null && !QuantityText.TryReadTolerance(tolerance, out percent, out QuantityFault fault))
         {
-            refusal = Words(plain.Length + fault.Offset + 1, fault.Found, fault.Expected);
+            character = plain.Length + fault.Offset + 1;
+            refusal = Words(character.Value, fault.Found, fault.Expected);
             return false;
         }
 
@@ -36,7 +38,8 @@ public static class TypedValue
         if (faults.Count > 0 || value is null)
         {
             value = null;
-            refusal = faults.Count == 0 ? "" : Words(Math.Max(faults[0].Column, 1), faults[0].Found, faults[0].Expected);
+            character = faults.Count == 0 ? null : Math.Max(faults[0].Column, 1);
+            refusal = character is { } at ? Words(at, faults[0].Found, faults[0].Expected) : "";
             return false;
         }
 

@@ -7,7 +7,6 @@ using RegenTrainer.Drawing;
 using RegenTrainer.Files;
 using RegenTrainer.Files.Reports;
 using RegenTrainer.Screens;
-using RegenTrainer.Session;
 
 namespace RegenTrainer.Commands;
 
@@ -57,7 +56,7 @@ internal static class OpenCommand
             Setting asked = setting.Read(line, opened);
             if (!line.GetValue(context.Json) && !Console.IsOutputRedirected && ScreenCommand.CanRun())
             {
-                return ScreenCommand.Run(new StageSolver(opened.Model, setting.AudioHz(line)), asked, line.GetValue(glyphs), FaultLog.Keep);
+                return ScreenCommand.Run(opened.Document, asked, setting.AudioHz(line), line.GetValue(glyphs), FaultLog.Keep);
             }
 
             Reading reading = StageReader.Read(new StageWorkspace(opened.Model), asked, setting.AudioHz(line));

@@ -3,6 +3,7 @@ using RegenTrainer.Core.Quantities;
 using RegenTrainer.Core.Stages;
 using RegenTrainer.Files;
 using RegenTrainer.Files.Devices;
+using RegenTrainer.Session;
 
 namespace RegenTrainer.Commands;
 
@@ -11,7 +12,11 @@ internal sealed class OpenedStage
 {
     private readonly string _name;
 
-    private OpenedStage(string name, StageDesign design) => (_name, Model) = (name, StageModel.Compile(design));
+    private OpenedStage(string name, StageDocument document) =>
+        (_name, Document, Model) = (name, document, StageModel.Compile(document.Design));
+
+    /// <summary>The stage with the text it was read from.</summary>
+    public StageDocument Document { get; }
 
     /// <summary>The stage, ready for solving.</summary>
     public StageModel Model { get; }
@@ -28,8 +33,8 @@ internal sealed class OpenedStage
     /// <exception cref="StopException">It has faults.</exception>
     public static OpenedStage Open(string name)
     {
-        (StageDesign? design, IReadOnlyList<FileFault> faults) = TryOpen(name);
-        return design is null ? throw Refusal(faults) : new OpenedStage(name, design);
+        OpenedFile file = Read(name);
+        return file.Design is null ? throw Refusal(file.Faults) : new OpenedStage(name, StageDocument.Of(name, file));
     }
 
     /// <summary>Opens a stage's design, or finds every fault of its file.</summary>
@@ -37,10 +42,8 @@ internal sealed class OpenedStage
     /// <exception cref="StopException">The file cannot be read at all.</exception>
     public static (StageDesign? Design, IReadOnlyList<FileFault> Faults) TryOpen(string name)
     {
-        OpenedFile file = StageFiles.Open(name);
-        return file.Message is { } message
-            ? throw new StopException(ExitCode.Stage, "regentrainer: " + Printable.Text(message))
-            : (file.Design, file.Faults);
+        OpenedFile file = Read(name);
+        return (file.Design, file.Faults);
     }
 
     /// <summary>Ends a command with the faults of a file, one a line.</summary>
@@ -63,5 +66,13 @@ internal sealed class OpenedStage
         return found?.Model ?? throw new StopException(
             ExitCode.CommandLine,
             $"regentrainer: --device: found \"{Options.Shown(name)}\", expected one of {string.Join(", ", shelf.Names)}");
+    }
+
+    private static OpenedFile Read(string name)
+    {
+        OpenedFile file = StageFiles.Open(name);
+        return file.Message is { } message
+            ? throw new StopException(ExitCode.Stage, "regentrainer: " + Printable.Text(message))
+            : file;
     }
 }

@@ -34,19 +34,23 @@ internal static class KeyList
 
     private static readonly (string Key, string Does)[] _bench =
     [
+        ("e", "parts of the stage"),
+        ("u r", "undo, redo"),
+        ("w W", "save, save as"),
+        ("o", "open another stage"),
         ("p", "pin for comparison"),
         ("Esc", "closes what is open"),
         ("q", "quit"),
     ];
 
-    /// <summary>Draws the keys of the hands and the bench, and those of the open page.</summary>
-    public static void Draw(Canvas canvas, Region region, string page, IReadOnlyList<(string Key, string Does)> pageKeys)
+    /// <summary>Draws the keys of the hands and the bench, and those of what is open.</summary>
+    public static void Draw(Canvas canvas, Region region, string open, IReadOnlyList<(string Key, string Does)> openKeys)
     {
         int half = (region.Width - Gap) / 2;
         var left = new Region(region.Left, region.Top, half, region.Height);
-        left = Group(canvas, left, "regeneration control; wheel and drag on the strip", _control);
+        left = Group(canvas, left, "control; wheel and drag on the strip", _control);
         left = Group(canvas, left, "battery, room, device", _conditions);
-        Group(canvas, left, "this page: " + page, pageKeys);
+        Group(canvas, left, "here: " + open, openKeys);
         var right = new Region(region.Left + half + Gap, region.Top, half, region.Height);
         right = Group(canvas, right, "tuning", _tuning);
         Group(canvas, right, "bench; digits and clicks open pages", _bench);

@@ -26,6 +26,19 @@ internal sealed record Readout(string Label, double? Value, Func<double?, string
         Quantity("tuning capacitor", reading.TuningFarad, Unit.Farad),
     ];
 
+    /// <summary>The figures that tell most of a change of parts, in their order.</summary>
+    public static IReadOnlyList<Readout> OfChange(Reading reading) =>
+    [
+        new("effective Q", reading.EffectiveQ, Figures.Q, Figures.QDifference),
+        new(
+            "tips over at",
+            reading.TipOver?.Crossings is [{ TravelPercent: var travel }, ..] ? travel : null,
+            v => v is { } percent ? Figures.Fixed(percent, "0.00") + " %" : Figures.None,
+            d => Figures.Signed(d, "0.00") + " %"),
+        Quantity("bandwidth \u22123 dB", reading.BandwidthHz, Unit.Hertz),
+        Level("stage gain", reading.StageGainDb),
+    ];
+
     private static Readout Quantity(string label, double? value, Unit unit) =>
         new(label, value, v => Figures.Quantity(v, unit), d => Figures.Difference(d, unit));
 

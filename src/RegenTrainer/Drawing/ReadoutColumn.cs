@@ -9,7 +9,15 @@ internal static class ReadoutColumn
     public const int DifferenceWidth = 11;
 
     /// <summary>Draws them; every figure stands on the same row whatever the regime.</summary>
-    public static void Draw(Canvas canvas, Region region, Reading reading, Reading? pinned)
+    public static void Draw(Canvas canvas, Region region, Reading reading, Reading? pinned) =>
+        Draw(canvas, region, reading, pinned, Readout.Of, Ink.Pinned);
+
+    /// <summary>Draws those that tell most of a change of parts, with what it changed; what it did not has nothing beside it.</summary>
+    public static void DrawChange(Canvas canvas, Region region, Reading reading, Reading? before) =>
+        Draw(canvas, region, reading, Equals(before, reading) ? null : before, Readout.OfChange, Ink.Label);
+
+    private static void Draw(
+        Canvas canvas, Region region, Reading reading, Reading? earlier, Func<Reading, IReadOnlyList<Readout>> readouts, Ink difference)
     {
         if (reading.TankHz is null)
         {
@@ -19,8 +27,8 @@ internal static class ReadoutColumn
             return;
         }
 
-        IReadOnlyList<Readout> now = Readout.Of(reading);
-        IReadOnlyList<Readout>? then = pinned is null ? null : Readout.Of(pinned);
+        IReadOnlyList<Readout> now = readouts(reading);
+        IReadOnlyList<Readout>? then = earlier is null ? null : readouts(earlier);
         int figures = region.Right - (then is null ? 0 : DifferenceWidth);
         for (int k = 0; k < now.Count && k < region.Height; k++)
         {
@@ -29,7 +37,7 @@ internal static class ReadoutColumn
             canvas.PutBefore(figures, row, now[k].Write(now[k].Value), Ink.Text);
             if (now[k].Value is { } value && then?[k].Value is { } old)
             {
-                canvas.PutBefore(region.Right, row, now[k].WriteDifference(value - old), Ink.Pinned);
+                canvas.PutBefore(region.Right, row, now[k].WriteDifference(value - old), difference);
             }
         }
     }

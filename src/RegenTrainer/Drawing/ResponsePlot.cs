@@ -43,17 +43,26 @@ internal static class ResponsePlot
     }
 
     /// <summary>Draws it over the curves of what the stage is compared with, each about its own station.</summary>
-    public static void Draw(Canvas canvas, Region region, StageSnapshot stage, in Compared compared)
+    /// <param name="canvas">The screen.</param>
+    /// <param name="region">The region.</param>
+    /// <param name="stage">The stage.</param>
+    /// <param name="compared">What it is compared with.</param>
+    /// <param name="bare">Without heading and neighbours, and with the scale in the rule: where rows are few.</param>
+    public static void Draw(Canvas canvas, Region region, StageSnapshot stage, in Compared compared, bool bare = false)
     {
-        string heading = region.Width >= FullFrom ? "response, \u00b120 kHz around the station" : "\u00b120 kHz around the station";
-        canvas.Put(region.Left, region.Top, heading, Ink.Label, region.Right);
+        if (!bare)
+        {
+            string heading = region.Width >= FullFrom ? "response, \u00b120 kHz around the station" : "\u00b120 kHz around the station";
+            canvas.Put(region.Left, region.Top, heading, Ink.Label, region.Right);
+        }
+
         if (stage.Curve.Count < 2)
         {
-            NoResponse(canvas, region with { Top = region.Top + 2, Height = region.Height - 2 }, stage);
+            NoResponse(canvas, bare ? region : region with { Top = region.Top + 2, Height = region.Height - 2 }, stage);
             return;
         }
 
-        Region plot = Picture(region);
+        Region plot = bare ? new(region.Left + ScaleWidth, region.Top, region.Width - ScaleWidth, region.Height - 1) : Picture(region);
         double stationHz = stage.Reading.Setting.StationHz;
         double peakDb = compared.Earlier.Select(earlier => earlier.Stage).Append(stage).SelectMany(s => s.Curve).Max(point => point.GainDb);
         double lowestDb = stage.Curve.Min(point => point.GainDb) - peakDb;
@@ -78,8 +87,11 @@ internal static class ResponsePlot
 
         grid.CopyTo(canvas, plot.Left, plot.Top, Ink.Response);
         DecibelScale(canvas, region.Left, plot, depth);
-        KilohertzScale(canvas, plot);
-        Neighbours(canvas, region, plot, grid, stage);
+        KilohertzScale(canvas, plot, bare ? plot.Bottom : plot.Bottom + 1);
+        if (!bare)
+        {
+            Neighbours(canvas, region, plot, grid, stage);
+        }
     }
 
     private static Region Picture(Region region) =>
@@ -110,7 +122,7 @@ internal static class ResponsePlot
         }
     }
 
-    private static void KilohertzScale(Canvas canvas, Region plot)
+    private static void KilohertzScale(Canvas canvas, Region plot, int labels)
     {
         for (int column = plot.Left; column < plot.Right; column++)
         {
@@ -124,11 +136,11 @@ internal static class ResponsePlot
             string label = Figures.Signed(khz, "0");
             if (khz == SpanKhz)
             {
-                canvas.PutBefore(plot.Right, plot.Bottom + 1, label + " kHz", Ink.Label);
+                canvas.PutBefore(plot.Right, labels, label + " kHz", Ink.Label);
             }
             else if (khz != SpanKhz / 2 || plot.Width + ScaleWidth >= FullFrom)
             {
-                canvas.Put(column - (khz == -SpanKhz ? 0 : label.Length / 2), plot.Bottom + 1, label, Ink.Label);
+                canvas.Put(column - (khz == -SpanKhz ? 0 : label.Length / 2), labels, label, Ink.Label);
             }
         }
     }
@@ -164,7 +176,8 @@ internal static class ResponsePlot
     {
         if (stage.Reading is { GrowthPerSecond: > 0 and var growth, TankHz: { } hz })
         {
-            canvas.Put(region.Left, region.Top, "no response is drawn: the stage oscillates", Ink.Oscillating, region.Right);
+            string heading = region.Width >= FullFrom ? "no response is drawn: the stage oscillates" : "no response: the stage oscillates";
+            canvas.Put(region.Left, region.Top, heading, Ink.Oscillating, region.Right);
             string where = stage.Reading.Cautions.FirstOrDefault(c => c.Code == OtherCircuitCode)?.Text ?? $"at {Figures.Tank(hz)}, as it begins";
             canvas.Put(region.Left, region.Top + 2, where, Ink.Text, region.Right);
             string time = Figures.Quantity(1 / growth, Unit.Second);

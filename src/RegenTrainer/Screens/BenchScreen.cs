@@ -24,8 +24,10 @@ internal sealed class BenchScreen : Runnable
     private readonly Glyphs _glyphs;
     private readonly Theme _theme;
     private readonly IPage[] _pages;
+    private readonly PanelStack _panels = new();
+    private readonly EntryField _field;
+    private readonly FileDesk? _desk;
     private IPage _page;
-    private IPanel? _panel;
 
     public BenchScreen(Bench bench, Glyphs glyphs, Theme theme)
     {
@@ -34,6 +36,13 @@ internal sealed class BenchScreen : Runnable
         _page = _pages[0];
         (Width, Height, CanFocus) = (Dim.Fill(), Dim.Fill(), true);
         MousePositionTracking = false;
+        _field = new EntryField(Pressed, () => Middle, theme);
+        Add(_field);
+        if (bench.Workbench is { } workbench)
+        {
+            _desk = new FileDesk(workbench, _panels, bench.Tell, RequestStop);
+            _desk.OfferRecovery();
+        }
     }
 
     /// <inheritdoc/>
@@ -68,7 +77,7 @@ internal sealed class BenchScreen : Runnable
             Region middle = BenchFrame.Middle(width, height);
             StageSnapshot stage = _bench.Stage.Snapshot(ResponsePoints(middle));
             BenchFrame.Draw(canvas, stage, Tabs(), _bench.Words);
-            if (_panel is { } panel)
+            if (_panels.Top is { } panel)
             {
                 panel.Draw(canvas, middle, stage);
             }
@@ -96,12 +105,7 @@ internal sealed class BenchScreen : Runnable
             return false;
         }
 
-        if (Press(key))
-        {
-            SetNeedsDraw();
-        }
-
-        return true;
+        return Pressed(key);
     }
 
     /// <inheritdoc/>
@@ -122,7 +126,7 @@ internal sealed class BenchScreen : Runnable
         bool taken = held || at.Y >= BenchFrame.StripTop(Viewport.Height) ? OnStrip(mouse, at.X, held) : OnPage(mouse, at.X, at.Y);
         if (taken)
         {
-            SetNeedsDraw();
+            Refresh();
         }
 
         return taken;
@@ -133,7 +137,7 @@ internal sealed class BenchScreen : Runnable
     {
         if (disposing)
         {
-            Open(null);
+            _panels.CloseAll();
             foreach (IDisposable page in _pages.OfType<IDisposable>())
             {
                 page.Dispose();
@@ -143,22 +147,26 @@ internal sealed class BenchScreen : Runnable
         base.Dispose(disposing);
     }
 
+    /// <summary>Takes a key, whatever it means.</summary>
+    private bool Pressed(Key key)
+    {
+        _bench.PutAway(lasting: key == Key.Esc && _panels.Top is null);
+        Press(key);
+        Refresh();
+        return true;
+    }
+
     private bool Press(Key key)
     {
         if (key == Key.Esc)
         {
-            Open(null);
-            return true;
+            return _panels.StepBack();
         }
 
-        if (_panel is { } panel)
+        if (_panels.Top is { } panel)
         {
             bool taken = panel.Press(key);
-            if (panel.IsDone)
-            {
-                Open(null);
-            }
-
+            _panels.CloseDone();
             if (taken || panel.TakesText)
             {
                 return true;
@@ -166,15 +174,8 @@ internal sealed class BenchScreen : Runnable
         }
 
         int character = key.IsAlt || key.IsCtrl ? 0 : key.AsRune.Value;
-        if (character == '?')
+        if (BenchKey(character))
         {
-            Open(_panel is KeysPanel ? null : new KeysPanel(_page));
-            return true;
-        }
-
-        if (character == 'q')
-        {
-            RequestStop();
             return true;
         }
 
@@ -184,13 +185,48 @@ internal sealed class BenchScreen : Runnable
             return true;
         }
 
-        if (character == 'p')
+        return (_panels.Top is null && _page.Press(key)) || StageKeys.Press(_bench.Stage, key);
+    }
+
+    /// <summary>Does what a key of the bench means; false where it means nothing there.</summary>
+    private bool BenchKey(int character)
+    {
+        Action? action = character switch
         {
-            _bench.TogglePin(_pages[0].ResponsePoints(BenchFrame.Middle(Viewport.Width, Viewport.Height), _glyphs));
-            return true;
+            '?' => ToggleKeys,
+            'q' => _desk is null ? RequestStop : _desk.Quit,
+            'p' => () => _bench.TogglePin(_pages[0].ResponsePoints(Middle, _glyphs)),
+            'e' when _bench.Workbench is { } workbench => () => ToggleParts(workbench),
+            'u' => () => _bench.Undo(redo: false),
+            'r' => () => _bench.Undo(redo: true),
+            'w' => _desk is null ? null : _desk.Save,
+            'W' => _desk is null ? null : _desk.SaveAs,
+            'o' => _desk is null ? null : _desk.Open,
+            _ => null,
+        };
+        action?.Invoke();
+        return action is not null;
+    }
+
+    private void ToggleKeys()
+    {
+        if (_panels.Top is KeysPanel keys)
+        {
+            _panels.Close(keys);
+            return;
         }
 
-        return (_panel is null && _page.Press(key)) || StageKeys.Press(_bench.Stage, key);
+        _panels.Open(_panels.Top is { } panel ? new KeysPanel(panel.Name, panel.Keys) : new KeysPanel(_page.Name, _page.Keys));
+    }
+
+    private void ToggleParts(Workbench workbench)
+    {
+        bool open = _panels.Top is PartsPanel;
+        _panels.CloseAll();
+        if (!open)
+        {
+            _panels.Open(new PartsPanel(_bench, workbench, _pages[0].ResponsePoints(Middle, _glyphs)));
+        }
     }
 
     private bool OnStrip(Mouse mouse, int column, bool held)
@@ -217,12 +253,12 @@ internal sealed class BenchScreen : Runnable
 
     private bool OnPage(Mouse mouse, int column, int row)
     {
-        Region middle = BenchFrame.Middle(Viewport.Width, Viewport.Height);
+        Region middle = Middle;
         bool inMiddle = row >= middle.Top && row < middle.Bottom;
         if (inMiddle && (mouse.Flags.HasFlag(MouseFlags.WheeledUp) || mouse.Flags.HasFlag(MouseFlags.WheeledDown)))
         {
             Key step = mouse.Flags.HasFlag(MouseFlags.WheeledUp) ? Key.CursorUp : Key.CursorDown;
-            return _panel?.Press(step) ?? _page.Press(step);
+            return _panels.Top?.Press(step) ?? _page.Press(step);
         }
 
         if (!mouse.Flags.HasFlag(MouseFlags.LeftButtonPressed))
@@ -241,34 +277,33 @@ internal sealed class BenchScreen : Runnable
             return false;
         }
 
-        bool taken = _panel?.Click(middle, column, row) ?? _page.Click(middle, column, row);
-        if (_panel is { IsDone: true })
-        {
-            Open(null);
-        }
-
+        bool taken = _panels.Top?.Click(middle, column, row) ?? _page.Click(middle, column, row);
+        _panels.CloseDone();
         return taken;
     }
 
     private void Show(IPage page)
     {
-        Open(null);
+        _panels.CloseAll();
         _page = page;
     }
 
-    private void Open(IPanel? panel)
+    /// <summary>Shows what has changed, and the line that is open for typing, if one is.</summary>
+    private void Refresh()
     {
-        _panel?.Close();
-        _panel = panel;
+        _field.Show(_panels.Top?.Entry);
+        SetNeedsDraw();
     }
 
-    private int ResponsePoints(Region middle) => _panel?.ResponsePoints(middle, _glyphs) ?? _page.ResponsePoints(middle, _glyphs);
+    private Region Middle => BenchFrame.Middle(Viewport.Width, Viewport.Height);
+
+    private int ResponsePoints(Region middle) => _panels.Top?.ResponsePoints(middle, _glyphs) ?? _page.ResponsePoints(middle, _glyphs);
 
     private PageTab[] Tabs() => [.. _pages.Select(page => new PageTab(page.Digit, page.Name, page == _page))];
 
     private void OnIteration(object? sender, EventArgs<IApplication?> e)
     {
-        if (_page.Poll())
+        if (_page.Poll() | _bench.Tick())
         {
             SetNeedsDraw();
         }

@@ -29,6 +29,9 @@ internal sealed class Theme
     /// <summary>How an ink is shown.</summary>
     public Attribute Of(Ink ink) => _attributes[(int)ink];
 
+    /// <summary>How text being typed is shown, and what of it is selected.</summary>
+    public Attribute Typed(bool selected) => Of(Ink.Heading) with { Style = selected ? TextStyle.Reverse : TextStyle.Underline };
+
     /// <summary>Gives the screen library these colours for what it draws by itself, whatever its own settings say.</summary>
     public void Publish()
     {

@@ -13,6 +13,15 @@ internal interface IPanel
     /// <summary>Whether it has done its work and is to be closed.</summary>
     bool IsDone { get; }
 
+    /// <summary>What it is called in the list of keys.</summary>
+    string Name { get; }
+
+    /// <summary>Its own keys in words, at most four; none where they stand in the panel itself.</summary>
+    IReadOnlyList<(string Key, string Does)> Keys { get; }
+
+    /// <summary>The line of text that is open over it; null where none is.</summary>
+    Entry? Entry { get; }
+
     /// <summary>Evenly spaced points of the response it shows in a region.</summary>
     int ResponsePoints(Region region, Glyphs glyphs);
 
@@ -24,6 +33,9 @@ internal interface IPanel
 
     /// <summary>Does what a click on a cell of the region means; false where it means nothing.</summary>
     bool Click(Region region, int column, int row);
+
+    /// <summary>Closes what is open inside of it; false where nothing is, so that Escape closes the panel itself.</summary>
+    bool StepBack();
 
     /// <summary>Called once as it closes, however it does.</summary>
     void Close();
