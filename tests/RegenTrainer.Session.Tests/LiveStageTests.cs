@@ -1,6 +1,8 @@
 using RegenTrainer.Core.Devices;
 using RegenTrainer.Core.Regeneration;
 using RegenTrainer.Core.Stages;
+using RegenTrainer.Files;
+using RegenTrainer.Files.Devices;
 
 namespace RegenTrainer.Session.Tests;
 
@@ -191,5 +193,59 @@ public sealed class LiveStageTests
         Assert.Equal((983e3, 1023e3), (hz[0], hz[^1]));
         Assert.Contains(1000e3, hz);
         Assert.Equal(hz.Order(), hz);
+    }
+
+    [Fact]
+    public void Another_stage_comes_under_hands_that_stay()
+    {
+        var live = new LiveStage(new MadeUpStage((60, true)), _start with { TravelPercent = 55, SupplyVolt = 2.4, Grade = Grade.Weak });
+        Setting hands = live.Setting;
+        StageSnapshot before = live.Snapshot(11);
+        var other = new MadeUpStage((70, true)) { Title = "Other" };
+        live.Replace(other);
+        Assert.Same(other, live.Solver);
+        Assert.Equal(hands, live.Setting);
+        StageSnapshot after = live.Snapshot(11);
+        Assert.Equal("Other", after.Title);
+        Assert.NotEqual(before.Regimes, after.Regimes);
+        Assert.Equal(70, live.Reading.TipOver!.Crossings[0].TravelPercent);
+    }
+
+    [Fact]
+    public void A_dial_another_stage_does_not_reach_stays_and_the_reading_says_so()
+    {
+        var live = new LiveStage(new MadeUpStage((60, true)), _start);
+        live.Replace(new MadeUpStage((60, true)), live.Setting with { DialHz = 1600e3 });
+        Assert.Equal(1600e3, live.Setting.DialHz);
+        Assert.False(live.Reading.Reachable);
+    }
+
+    [Fact]
+    public void What_does_not_suit_another_stage_is_let_go()
+    {
+        var npn = new StageSolver(StageModel.Compile(Presets.Read("tapped-coil-npn")), [1000]);
+        var pnp = new StageSolver(StageModel.Compile(Presets.Read("tapped-coil-pnp")), [1000]);
+        var plain = new StageSolver(StageModel.Compile(Presets.Read("plain-tank")), [1000]);
+        BipolarModel device = DeviceShelf.Shipped.Find("2N4401")!.Model!;
+        var live = new LiveStage(npn, _start with { Device = device, SupplyVolt = 2.4 });
+        Assert.Equal("2N4401", live.Reading.Setting.Device);
+        live.Replace(pnp);
+        Assert.Equal((null, 2.4), (live.Setting.Device, live.Setting.SupplyVolt));
+        Assert.Equal("BC557B", live.Reading.Setting.Device);
+        live.Replace(plain);
+        Assert.Null(live.Setting.SupplyVolt);
+    }
+
+    [Fact]
+    public void A_locked_capacitor_stays_where_it_is_under_another_stage()
+    {
+        var live = new LiveStage(new StageSolver(StageModel.Compile(Presets.Read(Presets.Default)), [1000]), _start);
+        live.ToggleLock();
+        double farad = live.Reading.TuningFarad!.Value;
+        StageDesign fewer = Presets.Read(Presets.Default).With("coil.turns", FieldValue.Of(80));
+        live.Replace(new StageSolver(StageModel.Compile(fewer), [1000]));
+        Assert.Equal(farad, live.Reading.TuningFarad!.Value, farad * 1e-9);
+        Assert.Equal(_start.DialHz, live.Setting.DialHz);
+        Assert.True(live.Reading.TankHz > 1.01e6);   // fewer turns tune higher
     }
 }

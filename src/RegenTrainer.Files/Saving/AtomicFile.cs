@@ -21,7 +21,8 @@ public static class AtomicFile
         reason = "";
         try
         {
-            string target = new FileInfo(path).ResolveLinkTarget(returnFinalTarget: true)?.FullName ?? Path.GetFullPath(path);
+            var asked = new FileInfo(path);
+            string target = asked.LinkTarget is null ? asked.FullName : asked.ResolveLinkTarget(returnFinalTarget: true)!.FullName;
             if (Directory.Exists(target))
             {
                 reason = "it is a folder; give the name of a file in it";

@@ -18,6 +18,20 @@ public readonly record struct ProcessMark(int Id, long StartSecond)
     /// <summary>Whether this process still runs.</summary>
     public bool IsRunning => Of(Id) is { } now && Math.Abs(now.StartSecond - StartSecond) <= Slack;
 
+    /// <summary>The running process of a number; null where there is none.</summary>
+    public static ProcessMark? Of(int id)
+    {
+        try
+        {
+            using Process process = Process.GetProcessById(id);
+            return new ProcessMark(id, new DateTimeOffset(process.StartTime).ToUnixTimeSeconds());
+        }
+        catch (Exception e) when (e is ArgumentException or InvalidOperationException or Win32Exception or NotSupportedException)
+        {
+            return null;
+        }
+    }
+
     /// <summary>Reads what <see cref="ToString"/> wrote; null for anything else.</summary>
     public static ProcessMark? Parse(string text)
     {
@@ -31,17 +45,4 @@ public readonly record struct ProcessMark(int Id, long StartSecond)
 
     /// <summary>Number and second, with a blank between.</summary>
     public override string ToString() => string.Create(CultureInfo.InvariantCulture, $"{Id} {StartSecond}");
-
-    private static ProcessMark? Of(int id)
-    {
-        try
-        {
-            using Process process = Process.GetProcessById(id);
-            return new ProcessMark(id, new DateTimeOffset(process.StartTime).ToUnixTimeSeconds());
-        }
-        catch (Exception e) when (e is ArgumentException or InvalidOperationException or Win32Exception or NotSupportedException)
-        {
-            return null;
-        }
-    }
 }

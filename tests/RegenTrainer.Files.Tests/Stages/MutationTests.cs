@@ -1,3 +1,4 @@
+using System.Diagnostics;
 using System.Text;
 using RegenTrainer.Files.Devices;
 using RegenTrainer.Files.Stages;
@@ -7,7 +8,10 @@ namespace RegenTrainer.Files.Tests.Stages;
 /// <summary>Texts nobody meant give a design or faults with places inside the text, never anything else.</summary>
 public sealed class MutationTests
 {
-    private const int Texts = 2000;
+    private const int Texts = 20_000;
+
+    /// <summary>Seconds for all texts, and for any of them.</summary>
+    private const double LongestAll = 20, LongestOne = 1;
     private const string Odd = "[]{}=\"'#,.\n\\\t\u0000\u001b\u202e€0123456789eE-+kKMmunp%";
 
     [Fact]
@@ -24,6 +28,7 @@ public sealed class MutationTests
         }
 
         int good = 0;
+        TimeSpan all = TimeSpan.Zero;
         for (int k = 0; k < Texts; k++)
         {
             var text = new StringBuilder(presets[k % presets.Length]);
@@ -49,7 +54,11 @@ public sealed class MutationTests
             }
 
             string mangled = text.ToString();
+            long started = Stopwatch.GetTimestamp();
             StageReadResult result = StageText.Read(mangled, "mangled.toml", DeviceShelf.Shipped);
+            TimeSpan one = Stopwatch.GetElapsedTime(started);
+            all += one;
+            Assert.True(one.TotalSeconds < LongestOne, mangled);
             Assert.True(result.Design is null == result.Faults.Count > 0, mangled);
             int lines = mangled.Split('\n').Length;
             Assert.All(result.Faults, f => Assert.True(f.Line >= 1 && f.Line <= lines + 1 && f.Column >= 1, $"{f}\n{mangled}"));
@@ -57,6 +66,7 @@ public sealed class MutationTests
             good += result.Design is null ? 0 : 1;
         }
 
+        Assert.InRange(all.TotalSeconds, 0, LongestAll);
         Assert.InRange(good, 50, Texts - 50);   // both outcomes happen: the check looks at something
     }
 }
