@@ -10,14 +10,14 @@ internal static class ReadoutColumn
 
     /// <summary>Draws them; every figure stands on the same row whatever the regime.</summary>
     public static void Draw(Canvas canvas, Region region, Reading reading, Reading? pinned) =>
-        Draw(canvas, region, reading, pinned, Readout.Of, Ink.Pinned);
+        Draw(canvas, region, reading, pinned, Readout.Of, Ink.Pinned, unchanged: true);
 
     /// <summary>Draws those that tell most of a change of parts, with what it changed; what it did not has nothing beside it.</summary>
     public static void DrawChange(Canvas canvas, Region region, Reading reading, Reading? before) =>
-        Draw(canvas, region, reading, Equals(before, reading) ? null : before, Readout.OfChange, Ink.Label);
+        Draw(canvas, region, reading, before, Readout.OfChange, Ink.Label, unchanged: false);
 
     private static void Draw(
-        Canvas canvas, Region region, Reading reading, Reading? earlier, Func<Reading, IReadOnlyList<Readout>> readouts, Ink difference)
+        Canvas canvas, Region region, Reading reading, Reading? earlier, Func<Reading, IReadOnlyList<Readout>> readouts, Ink difference, bool unchanged)
     {
         if (reading.TankHz is null)
         {
@@ -35,7 +35,7 @@ internal static class ReadoutColumn
             int row = region.Top + k;
             canvas.Put(region.Left, row, now[k].Label, Ink.Label, figures);
             canvas.PutBefore(figures, row, now[k].Write(now[k].Value), Ink.Text);
-            if (now[k].Value is { } value && then?[k].Value is { } old)
+            if (now[k].Value is { } value && then?[k].Value is { } old && (unchanged || value != old))
             {
                 canvas.PutBefore(region.Right, row, now[k].WriteDifference(value - old), difference);
             }

@@ -241,8 +241,9 @@ public sealed class FileDeskTests
     [Fact]
     public void A_home_that_cannot_be_written_is_a_notice_and_stops_nothing()
     {
-        using var work = new WorkedStage();
-        File.WriteAllText(Path.Combine(work.Folder, "state"), "in the way");
+        string folder = Directory.CreateTempSubdirectory("regentrainer-home-").FullName;
+        File.WriteAllText(Path.Combine(folder, "state"), "in the way");
+        using var work = new WorkedStage(folder: folder);
         Change(work, "80");
         work.Terminal.PressUntil(() => work.Text.Contains("recovery", StringComparison.Ordinal));
         work.Terminal.Press(Key.Esc);

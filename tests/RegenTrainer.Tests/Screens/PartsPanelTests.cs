@@ -107,7 +107,8 @@ public sealed class PartsPanelTests
     [InlineData("coil.turns", "0", "1 to 5000")]
     [InlineData("coil.taps.base", "84", "1 to 83 turns")]
     [InlineData("coil.turns", "84.5", "whole number")]
-    [InlineData("coil.form_diameter", "3k", "metre")]
+    [InlineData("coil.form_diameter", "3 q", "metre")]
+    [InlineData("coil.form_diameter", "3k", "1 mm to 1 m")]
     public void What_cannot_be_is_refused_with_what_was_expected(string key, string typed, string expected)
     {
         using var work = new WorkedStage();
