@@ -8,7 +8,7 @@ namespace RegenTrainer.Files.Stages;
 /// <summary>Reads a winding on a core, stated by the core's inductance factor.</summary>
 internal static class CoredTable
 {
-    private const double MostCoupling = 0.9999;
+    private const double MostCoupling = 0.999;
 
     /// <summary>The part; null with its faults noted.</summary>
     public static Windings? Read(TableReader table, string name)

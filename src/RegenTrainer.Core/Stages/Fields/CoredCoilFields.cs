@@ -55,7 +55,7 @@ public static class CoredCoilFields
             FieldKind.Quantity,
             Unit.None,
             0,
-            0.9999)
+            0.999)
         {
             OnlyWith = WithCore,
         },
