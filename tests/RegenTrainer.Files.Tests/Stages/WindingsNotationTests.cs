@@ -134,8 +134,8 @@ public sealed class WindingsNotationTests
     }
 
     [Theory]
-    [InlineData("length = 25, height = 30, diameter = 0.002", "14:39: found 30, expected at most the length of the wire")]
-    [InlineData("length = 25, height = 8, diameter = 0.9", "14:53: found 0.9, expected 0.01 mm to 100 mm")]
+    [InlineData("length = 25, height = 30, diameter = 0.002", "13:32: found 30, expected at most the length of the wire")]
+    [InlineData("length = 25, height = 8, diameter = 0.9", "13:46: found 0.9, expected 0.01 mm to 100 mm")]
     public void A_wire_that_cannot_hang_is_told_at_its_value(string wire, string message)
     {
         string text = Frame.Replace("kind = \"windings\"", $"kind = \"antenna\"\nwire = {{ {wire} }}", StringComparison.Ordinal) + "between = [\"top\", \"earth\"]\n";
