@@ -83,7 +83,7 @@ public sealed class ReportKeyTests
 
         JsonElement coil = Parse(CoilJson.Write(null, SampleAnswers.Coil));
         Assert.Equal(
-            Head + "inductance_henry inductance_matrix_henry q at_hz resistance_ohm self_capacitance_farad wire_length_metre windings",
+            Head + "inductance_henry inductance_matrix_henry q at_hz resistance_ohm self_capacitance_farad wire_length_metre effective_height_metre windings",
             Keys(coil));
         Assert.Equal(
             "name turns inductance_henry q resistance_ohm self_capacitance_farad wire_length_metre",
