@@ -2,7 +2,6 @@ using System.Drawing;
 using RegenTrainer.Core.Quantities;
 using RegenTrainer.Drawing;
 using RegenTrainer.Screens;
-using Terminal.Gui.App;
 using Terminal.Gui.Input;
 using Terminal.Gui.Testing;
 using Glyphs = RegenTrainer.Drawing.Glyphs;
