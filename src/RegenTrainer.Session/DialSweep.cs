@@ -1,4 +1,5 @@
 using RegenTrainer.Core.Devices;
+using RegenTrainer.Core.Readings;
 using RegenTrainer.Core.Stages;
 
 namespace RegenTrainer.Session;
@@ -27,8 +28,11 @@ public static class DialSweep
         Grade[] grades = solver.HasGrades ? [Grade.Weak, Grade.Typical, Grade.Strong] : [Grade.Typical];
         var curves = new DialCurve[grades.Length];
         IStageSolver[] solvers = [.. grades.Select(_ => solver.Fork())];
-        Parallel.For(
-            0, grades.Length, k => curves[k] = new DialCurve(grades[k], solvers[k].AlongDial(request.Setting with { Grade = grades[k] }, hz)));
+        Parallel.For(0, grades.Length, k =>
+        {
+            IReadOnlyList<DialPoint> points = solvers[k].AlongDial(request.Setting with { Grade = grades[k] }, hz);
+            curves[k] = new DialCurve(grades[k], points, DeadSpot.Along(points));
+        });
         return new DialCurves(curves);
     }
 }

@@ -1,28 +1,39 @@
-using RegenTrainer.Core.Stages;
+using System.Runtime.ExceptionServices;
 
 namespace RegenTrainer.Session;
 
+/// <summary>An answer with what it is the answer to.</summary>
+/// <typeparam name="TKey">What is asked.</typeparam>
+/// <typeparam name="TResult">What is answered.</typeparam>
+/// <param name="Key">What was asked.</param>
+/// <param name="Result">The answer.</param>
+public sealed record LatestAnswer<TKey, TResult>(TKey Key, TResult Result);
+
 /// <summary>
-/// Answers requests on another thread. The work going on is finished, then the newest request is taken, so that answers keep
-/// coming while a key is held; the last answer stays, with the request it belongs to.
+/// Answers the newest of many requests on a thread of its own. The last answer stays, with the request it belongs to, until a newer
+/// one comes.
 /// </summary>
-/// <typeparam name="TRequest">A request; equal ones have the same answer.</typeparam>
-/// <typeparam name="TAnswer">Its answer, immutable.</typeparam>
-/// <param name="work">Answers a request; runs on one other thread at a time.</param>
-public sealed class LatestRequest<TRequest, TAnswer>(Func<TRequest, TAnswer> work)
-    where TRequest : class
-    where TAnswer : class
+/// <typeparam name="TKey">What is asked; equal keys have equal answers.</typeparam>
+/// <typeparam name="TResult">What is answered; immutable.</typeparam>
+/// <param name="answer">Works an answer out; told to stop by throwing for the token it may do so, and is asked on one thread at a time.</param>
+/// <param name="cutShort">
+/// Whether a newer request stops the work on an older one. Where work takes longer than a key repeats, an answer then comes only
+/// after the last key; without it every piece of work ends and gives an answer.
+/// </param>
+public sealed class LatestRequest<TKey, TResult>(Func<TKey, CancellationToken, TResult> answer, bool cutShort) : IDisposable
+    where TKey : notnull
 {
     private readonly Lock _lock = new();
-    private TRequest? _asked;
-    private TRequest? _waiting;
-    private bool _working;
-    private (TRequest Request, TAnswer Answer)? _latest;
-    private Exception? _fault;
-    private bool _changed;
+    private (TKey Key, CancellationTokenSource Stop)? _working;
+    private (TKey Key, bool Is) _waiting;
+    private (TKey Key, bool Is) _asked;
+    private LatestAnswer<TKey, TResult>? _latest;
+    private ExceptionDispatchInfo? _fault;
+    private bool _news;
+    private bool _disposed;
 
-    /// <summary>The last answer and its request; null before there is one.</summary>
-    public (TRequest Request, TAnswer Answer)? Latest
+    /// <summary>The last answer; null before there is one.</summary>
+    public LatestAnswer<TKey, TResult>? Latest
     {
         get
         {
@@ -33,90 +44,114 @@ public sealed class LatestRequest<TRequest, TAnswer>(Func<TRequest, TAnswer> wor
         }
     }
 
-    /// <summary>Whether a newer answer than <see cref="Latest"/> is on its way.</summary>
+    /// <summary>Whether an answer to the newest request is on its way.</summary>
     public bool IsWorking
     {
         get
         {
             lock (_lock)
             {
-                return _working;
+                return _working is not null;
             }
         }
     }
 
-    /// <summary>Asks; asking for what was asked last does nothing.</summary>
-    public void Ask(TRequest request)
+    /// <summary>Asks; what was asked last is not asked again.</summary>
+    public void Ask(TKey key)
     {
         lock (_lock)
         {
-            if (request.Equals(_asked))
+            ObjectDisposedException.ThrowIf(_disposed, this);
+            if (_asked.Is && EqualityComparer<TKey>.Default.Equals(_asked.Key, key))
             {
                 return;
             }
 
-            _asked = _waiting = request;
-            if (!_working)
+            _asked = _waiting = (key, true);
+            if (_working is not { } working)
             {
-                _working = true;
-                _ = Task.Run(Work);
+                Start();
             }
+            else if (cutShort)
+            {
+                working.Stop.Cancel();
+            }
+        }
+    }
+
+    /// <summary>Stops the work, and forgets what was asked; the last answer stays.</summary>
+    public void Cancel()
+    {
+        lock (_lock)
+        {
+            _asked = _waiting = default;
+            _working?.Stop.Cancel();
         }
     }
 
     /// <summary>Whether there is news since the last call.</summary>
-    /// <exception cref="AggregateException">The work failed by a fault of the program.</exception>
+    /// <exception cref="Exception">What the work threw, once.</exception>
     public bool Poll()
     {
         lock (_lock)
         {
-            if (_fault is { } fault)
-            {
-                _fault = null;
-                throw new AggregateException(fault);
-            }
-
-            (bool changed, _changed) = (_changed, false);
-            return changed;
+            (bool news, _news) = (_news, false);
+            (ExceptionDispatchInfo? fault, _fault) = (_fault, null);
+            fault?.Throw();
+            return news;
         }
     }
 
-    private void Work()
+    /// <summary>Stops the work; nothing can be asked any more.</summary>
+    public void Dispose()
     {
-        while (true)
+        Cancel();
+        lock (_lock)
         {
-            TRequest next;
-            lock (_lock)
-            {
-                if (_waiting is not { } waiting)
-                {
-                    (_working, _changed) = (false, true);
-                    return;
-                }
+            _disposed = true;
+        }
+    }
 
-                (next, _waiting) = (waiting, null);
+    private void Start()
+    {
+        var stop = new CancellationTokenSource();
+        TKey key = _waiting.Key;
+        (_working, _waiting) = ((key, stop), default);
+        _ = Task.Factory.StartNew(() => Work(key, stop), CancellationToken.None, TaskCreationOptions.LongRunning, TaskScheduler.Default);
+    }
+
+    private void Work(TKey key, CancellationTokenSource stop)
+    {
+        LatestAnswer<TKey, TResult>? found = null;
+        ExceptionDispatchInfo? fault = null;
+        try
+        {
+            found = new LatestAnswer<TKey, TResult>(key, answer(key, stop.Token));
+        }
+        catch (OperationCanceledException) when (stop.IsCancellationRequested)
+        {
+            // A newer request waits, or nobody wants it any more.
+        }
+        catch (Exception e)
+        {
+            fault = ExceptionDispatchInfo.Capture(e);
+        }
+
+        lock (_lock)
+        {
+            if (!stop.IsCancellationRequested)
+            {
+                (_latest, _fault) = (found ?? _latest, fault ?? _fault);
+                _news = true;
             }
 
-            TAnswer? answer = null;
-            Exception? failed = null;
-            try
+            _working = null;
+            if (_waiting.Is)
             {
-                answer = work(next);
-            }
-            catch (Exception fault)
-            {
-                failed = fault;
-            }
-
-            lock (_lock)
-            {
-                (_latest, _fault, _changed) = (answer is null ? _latest : (next, answer), failed ?? _fault, true);
+                Start();
             }
         }
+
+        stop.Dispose();
     }
 }
-
-/// <summary>A stage at a setting, as a request.</summary>
-/// <param name="Solver">The stage; it is asked on other threads only through <see cref="IStageSolver.Fork"/>.</param>
-/// <param name="Setting">The setting.</param>
-public sealed record StageRequest(IStageSolver Solver, Setting Setting);

@@ -12,15 +12,20 @@ namespace RegenTrainer.Benchmarks;
 [MemoryDiagnoser(false)]
 public class StageBenchmark
 {
+    private const int DialPoints = 60;
+
     private readonly StageWorkspace _workspace;
     private readonly TankQuery _query = new(1e6, DialMode.Follows, 0, 2000, 20, Grade.Typical, null, null);
     private TankHint _hint;
     private double _ohm = 2000;
+    private readonly StageWorkspace[] _threads;
+    private readonly DialPoint[] _dial = new DialPoint[3 * DialPoints];
 
     public StageBenchmark()
     {
         _workspace = new StageWorkspace(StageModel.Compile(Presets.Read(Presets.Default)));
         _hint = TankHint.From(TankSolver.Solve(_workspace, _query, TankHint.None));
+        _threads = [new StageWorkspace(_workspace.Model), new StageWorkspace(_workspace.Model)];
     }
 
     /// <summary>One step of the control (2 % of its resistance), operating point and tank mode solved again from the last.</summary>
@@ -48,5 +53,20 @@ public class StageBenchmark
     {
         _hint = TankHint.None;
         return StageReader.Read(_workspace, new Setting(1e6, 50), StageReader.DefaultAudioHz);
+    }
+
+    /// <summary>The dial with weak, typical and strong devices at 60 points each, on two threads.</summary>
+    [Benchmark]
+    public int DialThreeGrades()
+    {
+        Parallel.For(0, _threads.Length, thread =>
+        {
+            for (int k = thread; k < _dial.Length; k += _threads.Length)
+            {
+                Grade grade = (Grade)(k / DialPoints);
+                _dial[k] = DialRun.At(_threads[thread], new Setting(530e3 + (k % DialPoints * 19.5e3), 50) { Grade = grade });
+            }
+        });
+        return _dial.Length;
     }
 }

@@ -22,7 +22,7 @@ public sealed partial class JsonTableTests
         (string Section, string[][] Lines)[] answers =
         [
             ("reading", [["reading", "tapped-coil-npn", "--travel", "55", "--json"], ["reading", "plain-tank", "--travel", "100", "--json"]]),
-            ("dial", [["dial", "tapped-coil-npn", "--json"]]),
+            ("dial", [["dial", "tapped-coil-npn", "--supply", "0.6", "--json"], ["dial", "tapped-coil-npn", "--json"]]),
             ("sidebands", [["sidebands", "tapped-coil-npn", "--json"]]),
             ("bias", [["bias", "tapped-coil-npn", "--json"]]),
             ("coil", [["coil", "tapped-coil-npn", "--json"]]),

@@ -20,16 +20,17 @@ public sealed class LayerTests
     private static readonly Dictionary<string, string[]> _folders = new(StringComparer.Ordinal)
     {
         ["Quantities"] = [],
+        ["Antennas"] = ["Quantities"],
         ["Coils"] = ["Quantities"],
         ["Devices"] = ["Quantities"],
-        ["Circuits"] = ["Quantities", "Coils", "Devices"],
+        ["Circuits"] = ["Quantities", "Antennas", "Coils", "Devices"],
         ["Controls"] = ["Quantities"],
-        ["Stages"] = ["Quantities", "Coils", "Devices", "Circuits", "Controls"],
-        ["Tuning"] = ["Quantities", "Coils", "Devices", "Circuits", "Controls", "Stages"],
-        ["Regeneration"] = ["Quantities", "Coils", "Devices", "Circuits", "Controls", "Stages", "Tuning"],
-        ["Selectivity"] = ["Quantities", "Coils", "Devices", "Circuits", "Controls", "Stages", "Tuning"],
+        ["Stages"] = ["Quantities", "Antennas", "Coils", "Devices", "Circuits", "Controls"],
+        ["Tuning"] = ["Quantities", "Antennas", "Coils", "Devices", "Circuits", "Controls", "Stages"],
+        ["Regeneration"] = ["Quantities", "Antennas", "Coils", "Devices", "Circuits", "Controls", "Stages", "Tuning"],
+        ["Selectivity"] = ["Quantities", "Antennas", "Coils", "Devices", "Circuits", "Controls", "Stages", "Tuning"],
         ["Readings"] =
-            ["Quantities", "Coils", "Devices", "Circuits", "Controls", "Stages", "Tuning", "Regeneration", "Selectivity"],
+            ["Quantities", "Antennas", "Coils", "Devices", "Circuits", "Controls", "Stages", "Tuning", "Regeneration", "Selectivity"],
     };
 
     /// <summary>What a pure function has no use for.</summary>

@@ -1,4 +1,5 @@
 using System.Text.Json;
+using RegenTrainer.Files;
 
 namespace RegenTrainer.EndToEnd.Tests;
 
@@ -7,9 +8,19 @@ public sealed class PartsAnswerTests
 {
     private const double Tolerance = 1e-9;
 
-    public static TheoryData<string, string> Settings => new MatrixTheoryData<string, string>(
-        ["tapped-coil-npn", "tapped-coil-pnp", "tapped-coil-follower-off", "plain-tank"],
-        ["--dial 550k --travel 20", "--dial 1M --travel 50 --station 1004k --grade weak", "--dial 1.6M --travel 35 --supply 2.6 --temperature 5"]);
+    private static readonly string[] _mediumWave =
+        ["--dial 550k --travel 20", "--dial 1M --travel 50 --station 1004k --grade weak", "--dial 1.6M --travel 35 --supply 2.6 --temperature 5"];
+
+    private static readonly string[] _longWave =
+        ["--dial 155k --travel 20", "--dial 200k --travel 40 --station 202k --grade weak", "--dial 280k --travel 35 --supply 2.6 --temperature 5"];
+
+    private static readonly string[] _shortWave =
+        ["--dial 5.92M --travel 20", "--dial 6M --travel 50 --station 6004k --grade weak", "--dial 6.18M --travel 45 --supply 2.6 --temperature 5"];
+
+    public static IEnumerable<TheoryDataRow<string, string>> Settings =>
+        from preset in Presets.Names
+        from options in preset switch { "long-wave-ring" => _longWave, "short-wave-ring" => _shortWave, _ => _mediumWave }
+        select new TheoryDataRow<string, string>(preset, options);
 
     [Theory]
     [MemberData(nameof(Settings))]

@@ -48,24 +48,24 @@ public sealed class DialSweepTests
     public void The_newest_request_is_worked_out_last_and_asked_once()
     {
         var stage = new MadeUpStage((60, true));
-        var sweep = new LatestRequest<StageRequest, DialCurves>(DialSweep.Run);
+        using var sweep = new LatestRequest<StageRequest, DialCurves>((request, _) => DialSweep.Run(request), cutShort: false);
         for (int k = 0; k <= 50; k++)
         {
             sweep.Ask(DialSweep.Request(stage, new Setting(1e6, k)));
         }
 
-        Assert.True(SpinWait.SpinUntil(() => sweep.Poll() && !sweep.IsWorking && sweep.Latest?.Request.Setting.TravelPercent == 50, _patience));
-        DialCurves last = sweep.Latest!.Value.Answer;
+        Assert.True(SpinWait.SpinUntil(() => sweep.Poll() && !sweep.IsWorking && sweep.Latest?.Key.Setting.TravelPercent == 50, _patience));
+        DialCurves last = sweep.Latest!.Result;
         sweep.Ask(DialSweep.Request(stage, new Setting(700e3, 50) { StationHz = 710e3, Grade = Grade.Strong }));
         Assert.False(sweep.IsWorking, "dial, station and grade are of no account");
-        Assert.Same(last, sweep.Latest!.Value.Answer);
+        Assert.Same(last, sweep.Latest!.Result);
         Assert.False(sweep.Poll());
     }
 
     [Fact]
     public void A_fault_of_the_program_comes_to_the_thread_that_polls()
     {
-        var sweep = new LatestRequest<StageRequest, DialCurves>(DialSweep.Run);
+        using var sweep = new LatestRequest<StageRequest, DialCurves>((request, _) => DialSweep.Run(request), cutShort: false);
         sweep.Ask(new StageRequest(new MadeUpStage((60, true)) { Faulty = true }, new Setting(1e6, 40)));
         Assert.True(SpinWait.SpinUntil(() => !sweep.IsWorking, _patience));
         AggregateException fault = Assert.Throws<AggregateException>(() => sweep.Poll());

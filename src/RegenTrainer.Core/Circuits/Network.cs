@@ -175,9 +175,10 @@ public readonly record struct CapacitorStamp(PairStamp Pair, double Farad, doubl
 /// <param name="Q">Constant Q adding series resistance at alternating current; null for none.</param>
 /// <param name="Volt">Direct voltage of a supply.</param>
 /// <param name="Kind">What the branch is.</param>
+/// <param name="Emf">Share of the antenna's electromotive force in it, positive at its first end; 0 where it is no antenna.</param>
 internal readonly record struct BranchStamp(
     int FromBranch, int ToBranch, int BranchFrom, int BranchTo, int Diagonal, int Unknown,
-    double Henry, double SeriesOhm, double? Q, double Volt, BranchKind Kind);
+    double Henry, double SeriesOhm, double? Q, double Volt, BranchKind Kind, double Emf);
 
 /// <summary>What a current unknown belongs to.</summary>
 internal enum BranchKind

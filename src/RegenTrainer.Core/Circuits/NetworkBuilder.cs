@@ -189,7 +189,7 @@ internal sealed class NetworkBuilder
                 AddBranch(s.Name, s.From, s.To, 0, s.SeriesOhm, null, s.Volt, BranchKind.Supply);
                 break;
             case Antenna a:
-                AddBranch(a.Name, a.From, a.To, 0, 0, null, 0, BranchKind.Antenna);
+                AddBranch(a.Name, a.From, a.To, 0, 0, null, 0, BranchKind.Antenna, emf: 1);
                 break;
             case Windings w:
                 AddWindings(w);
@@ -233,13 +233,13 @@ internal sealed class NetworkBuilder
         }
     }
 
-    private int AddBranch(string name, string from, string to, double henry, double ohm, double? q, double volt, BranchKind kind)
+    private int AddBranch(string name, string from, string to, double henry, double ohm, double? q, double volt, BranchKind kind, double emf = 0)
     {
         int unknown = UnknownNames.Count;
         UnknownNames.Add("current of " + name);
         (int f, int t) = (Index(from), Index(to));
         var stamp = new BranchStamp(
-            Entry(f, unknown), Entry(t, unknown), Entry(unknown, f), Entry(unknown, t), Entry(unknown, unknown), unknown, henry, ohm, q, volt, kind);
+            Entry(f, unknown), Entry(t, unknown), Entry(unknown, f), Entry(unknown, t), Entry(unknown, unknown), unknown, henry, ohm, q, volt, kind, emf);
         if (f == t)
         {
             stamp = stamp with { FromBranch = -1, ToBranch = -1, BranchFrom = -1, BranchTo = -1 };   // a short-circuited branch
@@ -259,11 +259,16 @@ internal sealed class NetworkBuilder
             throw new InvalidOperationException($"{part.Name} has {sections} sections but nodes for {part.SectionNodes.Count}");
         }
 
+        if (part.PickUp is { } pickUp && pickUp.Shares.Count != sections)
+        {
+            throw new InvalidOperationException($"{part.Name} has {sections} sections but {pickUp.Shares.Count} shares of the antenna");
+        }
+
         int[] unknowns = new int[sections];
         for (int i = 0; i < sections; i++)
         {
             (string from, string to) = part.SectionNodes[i];
-            unknowns[i] = AddBranch($"{part.Name}, section {i + 1}", from, to, 0, 0, null, 0, BranchKind.Section);
+            unknowns[i] = AddBranch($"{part.Name}, section {i + 1}", from, to, 0, 0, null, 0, BranchKind.Section, -(part.PickUp?.Shares[i] ?? 0));
         }
 
         int[] entries = new int[sections * sections];

@@ -1,5 +1,7 @@
+using RegenTrainer.Core.Antennas;
 using RegenTrainer.Core.Coils;
 using RegenTrainer.Core.Devices;
+using RegenTrainer.Core.Quantities;
 
 namespace RegenTrainer.Core.Circuits;
 
@@ -15,6 +17,14 @@ public abstract record Part(string Name)
 
     /// <summary>The names of all nodes the part is connected to, in the order of its terminals.</summary>
     public abstract IReadOnlyList<string> Nodes { get; }
+
+    /// <summary>What lies outside the range the part's method was checked for, at a frequency.</summary>
+    /// <param name="hz">Frequency in Hz, above 0.</param>
+    public virtual IReadOnlyList<Caution> CautionsAt(double hz) => [];
+
+    /// <summary>Electromotive force over field in m, where the part is an antenna of known size; null elsewhere.</summary>
+    /// <param name="hz">Frequency in Hz, above 0.</param>
+    public virtual double? EffectiveHeightMetre(double hz) => null;
 }
 
 /// <summary>A part with two ends.</summary>
@@ -73,7 +83,17 @@ public sealed record Supply(string Name, string From, string To, double Volt, do
 /// <param name="Name">The builder's name of the part.</param>
 /// <param name="From">Node of the live end.</param>
 /// <param name="To">Node of the return end.</param>
-public sealed record Antenna(string Name, string From, string To) : TwoTerminalPart(Name, From, To);
+public sealed record Antenna(string Name, string From, string To) : TwoTerminalPart(Name, From, To)
+{
+    /// <summary>The wire that the parts behind it stand for; null where none is described.</summary>
+    public WireOverGround? Wire { get; init; }
+
+    /// <inheritdoc/>
+    public override IReadOnlyList<Caution> CautionsAt(double hz) => Wire?.CautionsAt(hz) ?? [];
+
+    /// <inheritdoc/>
+    public override double? EffectiveHeightMetre(double hz) => Wire?.EffectiveHeightMetre(hz);
+}
 
 /// <summary>
 /// An ideal feedback element: the current <c>Siemens x Factor x (v(SenseFrom) - v(SenseTo))</c> flows into the node
@@ -114,4 +134,13 @@ public sealed record Windings(string Name, IReadOnlyList<(string From, string To
 {
     /// <inheritdoc/>
     public override IReadOnlyList<string> Nodes => [.. SectionNodes.SelectMany(s => new[] { s.From, s.To }).Distinct()];
+
+    /// <summary>The part of the antenna's electromotive force that arises in the sections; null where the windings are no antenna.</summary>
+    public CoilPickUp? PickUp { get; init; }
+
+    /// <inheritdoc/>
+    public override IReadOnlyList<Caution> CautionsAt(double hz) => Model.CautionsAt(hz);
+
+    /// <inheritdoc/>
+    public override double? EffectiveHeightMetre(double hz) => PickUp?.EffectiveHeightMetre(hz);
 }

@@ -22,9 +22,9 @@ public static class ResponseSolver
         Array.Clear(w.Right);
         foreach (BranchStamp branch in w.Network.Branches)
         {
-            if (branch.Kind == BranchKind.Antenna)
+            if (branch.Emf != 0)
             {
-                w.Right[branch.Unknown] = 1 / Network.CurrentScaleOhm;
+                w.Right[branch.Unknown] = branch.Emf / Network.CurrentScaleOhm;
             }
         }
 

@@ -124,7 +124,8 @@ public sealed record Winding
     public override int GetHashCode() =>
         HashCode.Combine(RadiusMetre, Turns, PitchMetre, StartMetre, Wire, _tapTurns.Length, _tapTurns.Sum());
 
-    private static int[] CheckedTaps(IReadOnlyList<int> tapTurns, int turns)
+    /// <summary>A copy of taps that are in order.</summary>
+    internal static int[] CheckedTaps(IReadOnlyList<int> tapTurns, int turns)
     {
         if (tapTurns.Count > MostTaps)
         {

@@ -21,7 +21,10 @@ public static class CoilReader
         {
             CoilReading? one = part switch
             {
-                Windings windings => Read(windings.Name, windings.Model, hz, celsius),
+                Windings windings => Read(windings.Name, windings.Model, hz, celsius) with
+                {
+                    EffectiveHeightMetre = windings.EffectiveHeightMetre(hz),
+                },
                 Inductor inductor => Lone(inductor, hz, celsius),
                 _ => null,
             };
@@ -33,6 +36,7 @@ public static class CoilReader
                 {
                     Windings = [.. whole.Windings, .. one.Windings],
                     Cautions = [.. whole.Cautions, .. one.Cautions],
+                    EffectiveHeightMetre = whole.EffectiveHeightMetre ?? one.EffectiveHeightMetre,
                 },
             };
         }

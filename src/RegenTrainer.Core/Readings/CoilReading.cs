@@ -30,4 +30,8 @@ public sealed record CoilReading(
     double TemperatureCelsius,
     IReadOnlyList<WindingReading> Windings,
     IReadOnlyList<IReadOnlyList<double>> MatrixHenry,
-    IReadOnlyList<Caution> Cautions);
+    IReadOnlyList<Caution> Cautions)
+{
+    /// <summary>Electromotive force over field in metre, where the coil itself is the antenna; null elsewhere.</summary>
+    public double? EffectiveHeightMetre { get; init; }
+}

@@ -24,4 +24,7 @@ public sealed record DialPoint(double DialHz, bool Reachable)
 
     /// <summary>Pull against the device removed, in Hz.</summary>
     public double? PulledHz { get; init; }
+
+    /// <summary>Why regeneration is of no use here; null where the stage tips over within the travel, and for a stage without a control.</summary>
+    public DeadSpotReason? Dead { get; init; }
 }

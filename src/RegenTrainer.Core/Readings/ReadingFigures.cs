@@ -144,10 +144,7 @@ internal static class ReadingFigures
     {
         foreach (Part part in ws.Model.Network.Parts)
         {
-            if (part is Windings windings)
-            {
-                cautions.AddRange(windings.Model.CautionsAt(reading.TankHz ?? reading.Setting.DialHz));
-            }
+            cautions.AddRange(part.CautionsAt(reading.TankHz ?? reading.Setting.DialHz));
         }
 
         if (reading.Regime == Regime.Oscillating)

@@ -1,4 +1,6 @@
 using System.Collections.Frozen;
+using RegenTrainer.Core.Stages.Expansion;
+using RegenTrainer.Core.Stages.Fields;
 
 namespace RegenTrainer.Core.Stages;
 
@@ -36,6 +38,17 @@ public abstract class Family
     /// down, a node that floats). Single values are within their fields' ranges already.
     /// </summary>
     public abstract IReadOnlyList<FieldFault> Check(StageDesign design);
+
+    /// <summary>
+    /// The values that the design's choices ask for and that are missing, and those that have no meaning with its choices: the
+    /// part of <see cref="Check"/> that can be told of any design.
+    /// </summary>
+    public static IReadOnlyList<FieldFault> CheckChoices(StageDesign design)
+    {
+        FaultList faults = new();
+        ChoiceCheck.Check(design, faults);
+        return faults.Faults;
+    }
 
     /// <summary>The design as parts at nodes. The design has passed <see cref="Check"/>.</summary>
     public abstract StageCircuit Expand(StageDesign design);

@@ -51,8 +51,14 @@ public enum ToleranceKind
 /// <param name="Maximum">Largest allowed number, inclusive.</param>
 public sealed record Field(string Key, string Meaning, FieldKind Kind, Unit Unit, double Minimum, double Maximum)
 {
-    /// <summary>Whether a stage file must give the value.</summary>
+    /// <summary>Whether a stage file must give the value, where the conditions below hold.</summary>
     public bool Required { get; init; }
+
+    /// <summary>The choice without which the value has no meaning and may not be given; null where it always has one.</summary>
+    public FieldCondition? OnlyWith { get; init; }
+
+    /// <summary>The choice with which a required value must be given; null where that is <see cref="OnlyWith"/>.</summary>
+    public FieldCondition? RequiredWith { get; init; }
 
     /// <summary>The number in force where the file gives none; null where there is none.</summary>
     public double? Default { get; init; }
@@ -68,4 +74,16 @@ public sealed record Field(string Key, string Meaning, FieldKind Kind, Unit Unit
 
     /// <summary>The series the trade offers such values in; null where values are continuous.</summary>
     public PreferredSeries? Series { get; init; }
+
+    /// <summary>Whether the value must be given with the choices made.</summary>
+    /// <param name="word">The word in force for a key, or null where it is not known.</param>
+    public bool IsRequired(Func<string, string?> word) => Required && (RequiredWith ?? OnlyWith)?.Holds(word) != false;
+
+    /// <summary>What should stand where the value is missing, a phrase.</summary>
+    /// <param name="word">The word in force for a key, or null where it is not known.</param>
+    public string ExpectedWith(Func<string, string?> word)
+    {
+        string value = Kind == FieldKind.Quantity ? $"{Meaning}, {QuantityText.Write(Minimum, Unit)} to {QuantityText.Write(Maximum, Unit)}" : Meaning;
+        return (RequiredWith ?? OnlyWith) is { } condition ? $"{value}, with {condition.Key} = \"{word(condition.Key)}\"" : value;
+    }
 }

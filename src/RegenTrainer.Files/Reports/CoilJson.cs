@@ -19,6 +19,7 @@ public static class CoilJson
             writer.Number("resistance_ohm", first.ResistanceOhm);
             writer.Number("self_capacitance_farad", first.SelfCapacitanceFarad);
             writer.Number("wire_length_metre", first.WireLengthMetre);
+            writer.Number("effective_height_metre", coil.EffectiveHeightMetre);
             writer.List("windings", coil.Windings, (w, winding) =>
             {
                 w.Word("name", winding.Name);

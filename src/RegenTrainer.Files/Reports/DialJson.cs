@@ -11,10 +11,37 @@ public static class DialJson
     /// <param name="setting">The setting that all points share; its dial and station are ignored.</param>
     /// <param name="stationHz">The station of all points in Hz; null where each point has the station at its dial.</param>
     /// <param name="points">The points.</param>
+    /// <param name="reach">Where the reach of the tuning capacitor ends, in Hz.</param>
     /// <param name="cautions">Cautions about the run as a whole.</param>
     public static byte[] Write(
-        string stage, SettingInForce setting, double? stationHz, IReadOnlyList<DialPoint> points, IReadOnlyList<Caution> cautions) =>
-        Report.Write("dial", stage, SettingKeys.Along(setting, stationHz), cautions, writer => writer.List("points", points, Point));
+        string stage,
+        SettingInForce setting,
+        double? stationHz,
+        IReadOnlyList<DialPoint> points,
+        (double? LowHz, double? HighHz) reach,
+        IReadOnlyList<Caution> cautions) =>
+        Report.Write("dial", stage, SettingKeys.Along(setting, stationHz), cautions, writer =>
+        {
+            writer.List("points", points, Point);
+            writer.Number("reach_low_hz", reach.LowHz);
+            writer.Number("reach_high_hz", reach.HighHz);
+            writer.List("dead_spots", DeadSpot.Along(points), (w, spot) =>
+            {
+                w.Number("from_hz", spot.FromHz);
+                w.Number("to_hz", spot.ToHz);
+                w.Word("reason", Word(spot.Reason));
+            });
+        });
+
+    private static string Word(DeadSpotReason reason) => reason switch
+    {
+        DeadSpotReason.OutOfReach => "out-of-reach",
+        DeadSpotReason.AlwaysOscillates => "always-oscillates",
+        DeadSpotReason.OscillatesAtIdle => "oscillates-at-idle",
+        DeadSpotReason.TipsOverBeyondTravel => "tips-over-beyond-travel",
+        DeadSpotReason.NeverTipsOver => "never-tips-over",
+        _ => "unsolved",
+    };
 
     private static void Point(FigureWriter writer, DialPoint point)
     {

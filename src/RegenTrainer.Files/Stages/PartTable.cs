@@ -38,7 +38,7 @@ internal static class PartTable
             "supply" => Two(table, (a, b) => new Supply(
                 name, a, b, table.Quantity("voltage", Unit.Volt, -1000, 1000, true) ?? 0,
                 table.Quantity("resistance", Unit.Ohm, 0, MostOf(Unit.Ohm), false) ?? 0)),
-            "antenna" => Two(table, (a, b) => new Antenna(name, a, b)),
+            "antenna" => Two(table, (a, b) => PickUpTable.WithWire(table, new Antenna(name, a, b))),
             "bipolar" => Bipolar(table, name, source),
             "feedback" => Feedback(table, name),
             "windings" => WindingsTable.Read(table, name),

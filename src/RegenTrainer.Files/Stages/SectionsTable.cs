@@ -12,7 +12,7 @@ internal static class SectionsTable
     private const string Pattern = "a coupling [section, section, factor]";
 
     /// <summary>The part; null with its faults noted.</summary>
-    public static Part? Read(TableReader table, string name)
+    public static Windings? Read(TableReader table, string name)
     {
         int before = table.Faults.Count;
         List<InductiveSection> sections = [];

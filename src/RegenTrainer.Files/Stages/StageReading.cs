@@ -88,18 +88,19 @@ internal sealed class StageReading
         string? output = free ? Output(root) : null;
         Require(root, family);
         var design = new StageDesign(family, title, note, _values.ToImmutable(), _devices.ToImmutable(), parts, output);
-        if (check && family.Fields.All(f => !f.Required || _values.ContainsKey(f.Key)))
+        if (check)
         {
-            Check(root, design);
+            bool complete = family.Fields.All(f => !f.IsRequired(Word(family)) || _values.ContainsKey(f.Key));
+            Check(root, complete ? family.Check(design) : Family.CheckChoices(design).Where(f => _values.ContainsKey(f.Key)));
         }
 
         return design;
     }
 
     /// <summary>The faults of the values together, but for those that a value already refused may have brought about.</summary>
-    private void Check(TableReader root, StageDesign design)
+    private void Check(TableReader root, IEnumerable<FieldFault> found)
     {
-        foreach (FieldFault fault in design.Family.Check(design))
+        foreach (FieldFault fault in found)
         {
             bool ofParts = fault.Key is PartsKey or "output.node" || fault.Key.StartsWith("part:", StringComparison.Ordinal);
             if (!_spoiled.Contains(ofParts ? PartsKey : Parent(fault.Key)))
@@ -244,14 +245,16 @@ internal sealed class StageReading
 
     private void Require(TableReader root, Family family)
     {
-        foreach (Field field in family.Fields.Where(f => f.Required && !_places.Has(f.Key) && !_wrongTables.Contains(Parent(f.Key))))
+        Func<string, string?> word = Word(family);
+        foreach (Field field in family.Fields.Where(f => f.IsRequired(word) && !_places.Has(f.Key) && !_wrongTables.Contains(Parent(f.Key))))
         {
-            string expected = field.Kind == FieldKind.Quantity
-                ? $"{field.Meaning}, {QuantityValues.Expected(field.Unit, field.Minimum, field.Maximum)}"
-                : field.Meaning;
-            root.Refuse(_places.Of(field.Key, ""), $"no {field.Key}", expected);
+            root.Refuse(_places.Of(field.Key, ""), $"no {field.Key}", field.ExpectedWith(word));
         }
     }
+
+    /// <summary>The word in force for a key; null where the one given was refused.</summary>
+    private Func<string, string?> Word(Family family) =>
+        key => _values.TryGetValue(key, out FieldValue? value) ? value.Text : _places.Has(key) ? null : family.FieldFor(key)?.DefaultText;
 
     private static string Parent(string path) => path.Contains('.', StringComparison.Ordinal) ? path[..path.LastIndexOf('.')] : "";
 

@@ -5,7 +5,7 @@ using RegenTrainer.Files.Toml;
 
 namespace RegenTrainer.Files.Stages;
 
-/// <summary>Reads windings by their geometry: one winding, or several on one axis.</summary>
+/// <summary>Reads windings: by their geometry, one or several on one axis, by the core they are on, or by the inductance of their sections.</summary>
 internal static class WindingsTable
 {
     private const int MostWindings = 16;
@@ -16,19 +16,49 @@ internal static class WindingsTable
     private const double PitchSlack = 1e-9;
 
     /// <summary>The part; null with its faults noted.</summary>
-    public static Part? Read(TableReader table, string name) => table.Has("sections") ? SectionsTable.Read(table, name) : ByGeometry(table, name);
+    public static Part? Read(TableReader table, string name)
+    {
+        Windings? windings = table.Has("sections") ? SectionsTable.Read(table, name)
+            : table.Has("inductance_factor") ? CoredTable.Read(table, name)
+            : ByGeometry(table, name);
+        return PickUpTable.WithPickUp(table, windings);
+    }
 
-    private static Part? ByGeometry(TableReader table, string name)
+    /// <summary>The measured Q with its frequency; null where it is not given.</summary>
+    public static (double Q, double AtHz)? MeasuredQ(TableReader table, bool required)
+    {
+        if (table.Inner("q", required, "q = { value = .., at = .. }") is not { } q)
+        {
+            return null;
+        }
+
+        (double, double) measured =
+            (q.Quantity("value", Unit.None, 1, 1e6, required: true) ?? 1, q.Quantity("at", Unit.Hertz, 1e3, 1e9, required: true) ?? 1);
+        q.Finish();
+        return measured;
+    }
+
+    /// <summary>The nodes of one winding, start, taps and end; a fault where their number does not fit the taps.</summary>
+    public static IReadOnlyList<string> Nodes(TableReader table, IReadOnlyList<int> taps)
+    {
+        int before = table.Faults.Count;
+        List<string> names = Nodes(table);
+        if (table.Faults.Count == before && names.Count != taps.Count + 2)
+        {
+            table.Refuse(table.Table.Find("nodes")!.Value.At, $"{names.Count} nodes", $"{taps.Count + 2}: start, taps in order, end");
+        }
+
+        return names;
+    }
+
+    /// <summary>The ends of each section between neighbouring nodes.</summary>
+    public static IReadOnlyList<(string From, string To)> Between(IReadOnlyList<string> nodes) => [.. nodes.Zip(nodes.Skip(1))];
+
+    private static Windings? ByGeometry(TableReader table, string name)
     {
         int before = table.Faults.Count;
         double? formLoss = table.Quantity("form_loss_q", Unit.None, 1, 1e6, required: false);
-        (double, double)? measured = null;
-        if (table.Inner("q", required: false, "q = { value = .., at = .. }") is { } q)
-        {
-            measured = (q.Quantity("value", Unit.None, 1, 1e6, required: true) ?? 1, q.Quantity("at", Unit.Hertz, 1e3, 1e9, required: true) ?? 1);
-            q.Finish();
-        }
-
+        (double, double)? measured = MeasuredQ(table, required: false);
         Turns first = new(Form(table), Radius(table), Wire(table, null));
         List<Winding> windings = [];
         List<(string, string)> nodes = [];
@@ -111,12 +141,7 @@ internal static class WindingsTable
         double? pitch = Pitch(table, laid.Wire);
         double start = table.Quantity("start", Unit.Metre, -10, 10, required: false) ?? 0;
         List<int> taps = turns is { } all ? Taps(table, all) : [];
-        IReadOnlyList<string> names = Nodes(table);
-        if (table.Faults.Count == before && names.Count != taps.Count + 2)
-        {
-            table.Refuse(table.Table.Find("nodes")!.Value.At, $"{names.Count} nodes", $"{taps.Count + 2}: start, taps in order, end");
-        }
-
+        IReadOnlyList<string> names = table.Faults.Count == before ? Nodes(table, taps) : Nodes(table);
         if (laid is { Wire: { } own, Radius: { } given } && given < 0.5 * own.OverInsulationMetre)
         {
             table.Refuse(table.Table.Find("radius")?.Value.At ?? table.Table.At, QuantityText.Write(given, Unit.Metre), "at least half the wire over its insulation");
@@ -130,10 +155,7 @@ internal static class WindingsTable
         windings.Add(laid.Radius is { } radius
             ? new Winding(radius, turns!.Value, pitch ?? wire.OverInsulationMetre, wire, taps, start)
             : Winding.OnForm(laid.Form!.Value, wire, turns!.Value, pitch, taps, start));
-        for (int k = 1; k < names.Count; k++)
-        {
-            nodes.Add((names[k - 1], names[k]));
-        }
+        nodes.AddRange(Between(names));
     }
 
     private static double? Pitch(TableReader table, Wire? wire)
@@ -148,7 +170,8 @@ internal static class WindingsTable
         return pitch;
     }
 
-    private static List<int> Taps(TableReader table, int turns)
+    /// <summary>The taps of a winding, as turns from its start.</summary>
+    public static List<int> Taps(TableReader table, int turns)
     {
         List<int> taps = [];
         IReadOnlyList<TomlValue> items = table.List("taps", required: false, "a list of turns, counted from the start");

@@ -33,6 +33,9 @@ internal static class Notation
     /// <summary>A plain number that reads back to the last bit.</summary>
     public static string Number(double value) => value.ToString("R", CultureInfo.InvariantCulture);
 
+    /// <summary>A list of values that are in TOML notation already.</summary>
+    public static string List(IEnumerable<string> values) => $"[{string.Join(", ", values)}]";
+
     /// <summary>
     /// A quantity in quotes as the trade writes it, with as few figures as read back to the same number; without a letter
     /// where the text it replaces had none.

@@ -54,16 +54,17 @@ internal static class DialCommand
                     break;
                 }
 
-                points.AddRange(StageReader.AlongDial(workspace, asked, [hz]));
+                points.Add(DialRun.At(workspace, asked with { DialHz = hz }));
                 progress.Report(points.Count, raster.Count);
             }
         }
 
+        (double? LowHz, double? HighHz) reach = DialRun.Reach(workspace, asked);
         SettingInForce inForce = StageReader.Read(workspace, asked, []).Setting;
         context.Answer(
             line,
-            () => DialJson.Write(opened.Title, inForce, stationHz, points, cautions),
-            () => DialText.Of(opened.Title, inForce, stationHz, points, cautions));
+            () => DialJson.Write(opened.Title, inForce, stationHz, points, reach, cautions),
+            () => DialText.Of(opened.Title, inForce, stationHz, points, reach, cautions));
         return interruption.ExitCode ?? ExitCode.Done;
     }
 }

@@ -161,8 +161,38 @@ internal static class DialPage
             PutColumns(canvas, region, row++, quantity.Name, values, quantity.Unit, Ink.Text);
         }
 
-        Against(canvas, region with { Top = row + 1 }, points, curves, picture);
+        row = DeadSpots(canvas, region with { Top = row, Height = region.Bottom - row }, curves);
+        Against(canvas, region with { Top = row + 1, Height = region.Bottom - row - 1 }, points, curves, picture);
     }
+
+    /// <summary>Where on the dial which device is of no use, and why; returns the row after.</summary>
+    private static int DeadSpots(Canvas canvas, Region region, DialCurves curves)
+    {
+        foreach (DialCurve curve in curves.Curves)
+        {
+            foreach (DeadSpot spot in curve.DeadSpots)
+            {
+                string range = spot.FromHz == spot.ToHz
+                    ? Figures.Dial(spot.FromHz)
+                    : $"{Figures.Fixed(spot.FromHz / 1e3, "0")} to {Figures.Dial(spot.ToHz)}";
+                string who = curves.Curves.Count > 1 ? curve.Grade.ToString().ToLowerInvariant() + " " : "";
+                int next = canvas.PutWrapped(region, $"{who}{range}: {Words(spot.Reason)}", Ink.Caution);
+                region = region with { Top = next, Height = region.Bottom - next };
+            }
+        }
+
+        return region.Top;
+    }
+
+    private static string Words(DeadSpotReason reason) => reason switch
+    {
+        DeadSpotReason.OutOfReach => "out of reach",
+        DeadSpotReason.AlwaysOscillates => "always oscillates",
+        DeadSpotReason.OscillatesAtIdle => "oscillates at the idle stop",
+        DeadSpotReason.TipsOverBeyondTravel => "tips over beyond the travel",
+        DeadSpotReason.NeverTipsOver => "never tips over",
+        _ => "cannot be solved",
+    };
 
     /// <summary>Why there is no tip-over, in a word; a dash for other figures.</summary>
     private static string Word(DialPoint point, DialQuantity quantity) => quantity.Unit != "%" ? Figures.None : point.TipOver?.State switch

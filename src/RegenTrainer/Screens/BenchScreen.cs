@@ -132,6 +132,21 @@ internal sealed class BenchScreen : Runnable
         return taken;
     }
 
+    /// <inheritdoc/>
+    protected override void Dispose(bool disposing)
+    {
+        if (disposing)
+        {
+            _panels.CloseAll();
+            foreach (IDisposable page in _pages.OfType<IDisposable>())
+            {
+                page.Dispose();
+            }
+        }
+
+        base.Dispose(disposing);
+    }
+
     /// <summary>Takes a key, whatever it means.</summary>
     private bool Pressed(Key key)
     {

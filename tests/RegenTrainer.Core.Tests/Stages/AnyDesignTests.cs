@@ -37,7 +37,12 @@ public sealed class AnyDesignTests
                     values = values.SetItem(fields[i].Key, ValueOf(fields[i], shares[i]));
                 }
 
-                Settle(start with { Values = values });
+                // Values that mean nothing with the choices made are all refused: what is left is the design that may be sound.
+                StageDesign whole = start with { Values = values };
+                Settle(whole with
+                {
+                    Values = values.RemoveRange(fields.Where(f => f.OnlyWith?.Holds(whole.WordOrNull) == false).Select(f => f.Key)),
+                });
             },
             iter: count,
             threads: 1);

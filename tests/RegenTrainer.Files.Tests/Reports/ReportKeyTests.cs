@@ -45,8 +45,10 @@ public sealed class ReportKeyTests
     [Fact]
     public void The_other_answers_have_the_promised_keys()
     {
-        JsonElement dial = Parse(DialJson.Write("S", SampleAnswers.Setting, null, SampleAnswers.Points, []));
-        Assert.Equal(Head + "points", Keys(dial));
+        JsonElement dial = Parse(DialJson.Write("S", SampleAnswers.Setting, null, SampleAnswers.Points, (5.5e5, 1.9e6), []));
+        Assert.Equal(Head + "points reach_low_hz reach_high_hz dead_spots", Keys(dial));
+        Assert.Equal("from_hz to_hz reason", Keys(dial.GetProperty("dead_spots")[0]));
+        Assert.Equal("out-of-reach", dial.GetProperty("dead_spots")[0].GetProperty("reason").GetString());
         Assert.Equal(
             "dial_hz reachable tuning_farad tip_over_state tip_over_percent effective_q bandwidth_hz stage_gain_db pulled_hz",
             Keys(dial.GetProperty("points")[0]));
@@ -81,7 +83,7 @@ public sealed class ReportKeyTests
 
         JsonElement coil = Parse(CoilJson.Write(null, SampleAnswers.Coil));
         Assert.Equal(
-            Head + "inductance_henry inductance_matrix_henry q at_hz resistance_ohm self_capacitance_farad wire_length_metre windings",
+            Head + "inductance_henry inductance_matrix_henry q at_hz resistance_ohm self_capacitance_farad wire_length_metre effective_height_metre windings",
             Keys(coil));
         Assert.Equal(
             "name turns inductance_henry q resistance_ohm self_capacitance_farad wire_length_metre",

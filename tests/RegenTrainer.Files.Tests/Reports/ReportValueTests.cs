@@ -83,10 +83,10 @@ public sealed class ReportValueTests
     [Fact]
     public void A_run_along_the_dial_has_no_dial_of_its_own()
     {
-        JsonElement free = ReportKeyTests.Parse(DialJson.Write("S", SampleAnswers.Setting, null, [], []));
+        JsonElement free = ReportKeyTests.Parse(DialJson.Write("S", SampleAnswers.Setting, null, [], (null, null), []));
         Assert.Equal(JsonValueKind.Null, free.GetProperty("setting").GetProperty("dial_hz").ValueKind);
         Assert.Equal(JsonValueKind.Null, free.GetProperty("setting").GetProperty("station_hz").ValueKind);
-        JsonElement held = ReportKeyTests.Parse(DialJson.Write("S", SampleAnswers.Setting, 9.9e5, [], []));
+        JsonElement held = ReportKeyTests.Parse(DialJson.Write("S", SampleAnswers.Setting, 9.9e5, [], (null, null), []));
         Assert.Equal(9.9e5, held.GetProperty("setting").GetProperty("station_hz").GetDouble());
         Assert.Equal(61.9, held.GetProperty("setting").GetProperty("travel_percent").GetDouble());
     }

@@ -98,7 +98,7 @@ internal static class SampleAnswers
 
     public static readonly DialPoint[] Points =
     [
-        new(5.3e5, Reachable: false),
+        new(5.3e5, Reachable: false) { Dead = DeadSpotReason.OutOfReach },
         new(1e6, Reachable: true) { TuningFarad = 1.43e-10, TipOver = Full.TipOver, EffectiveQ = 1240, BandwidthHz = 806, StageGainDb = 31, PulledHz = -9 },
     ];
 }

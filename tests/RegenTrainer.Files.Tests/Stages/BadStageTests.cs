@@ -36,7 +36,7 @@ public sealed class BadStageTests
     {
         var golden = new StringBuilder();
         int count = 0;
-        foreach ((string name, string text) in Cases())
+        foreach ((string name, string text) in Cases().Concat(CasesOfChoices()))
         {
             StageReadResult result = StageText.Read(text, name + ".toml", DeviceShelf.Shipped);
             Assert.Null(result.Design);
@@ -63,14 +63,22 @@ public sealed class BadStageTests
         Assert.Empty(StageText.Read(Free, "free.toml", DeviceShelf.Shipped).Faults);
     }
 
+    /// <summary>A text with pieces replaced, given in pairs of old and now.</summary>
+    private static string WithEdits(string text, string[] edits)
+    {
+        for (int k = 0; k < edits.Length; k += 2)
+        {
+            Assert.Contains(edits[k], text, StringComparison.Ordinal);
+            text = text.Replace(edits[k], edits[k + 1], StringComparison.Ordinal);
+        }
+
+        return text;
+    }
+
     private static IEnumerable<(string Name, string Text)> Cases()
     {
         string preset = Presets.Text(Presets.Default);
-        (string, string) Edited(string name, string old, string now)
-        {
-            Assert.Contains(old, preset, StringComparison.Ordinal);
-            return (name, preset.Replace(old, now, StringComparison.Ordinal));
-        }
+        (string, string) Edited(string name, params string[] edits) => (name, WithEdits(preset, edits));
 
         (string, string) Extra(string name, string more) => (name, preset + "\n" + more);
         (string, string) Freely(string name, string old, string now)
@@ -177,5 +185,24 @@ public sealed class BadStageTests
         yield return ("many-faults", preset.Replace("\"680\"", "\"680 pF\"", StringComparison.Ordinal)
             .Replace("turns = 84", "turns = \"many\"", StringComparison.Ordinal).Replace("[layout]", "[layouts]", StringComparison.Ordinal)
             .Replace("main = \"BC547B\"", "main = \"NONE\"", StringComparison.Ordinal));
+    }
+    /// <summary>Cores and antennas: what a choice asks for, and what has no meaning with it.</summary>
+    private static IEnumerable<(string Name, string Text)> CasesOfChoices()
+    {
+        (string, string) Edited(string name, params string[] edits) => (name, WithEdits(Presets.Text(Presets.Default), edits));
+        (string, string) Cored(string name, params string[] edits) => (name, WithEdits(Presets.Text("ferrite-rod"), edits));
+        yield return Edited("core-without-its-figures", "form_diameter = \"50 mm\"", "core = \"rod\"");
+        yield return Edited("unknown-core", "form_diameter = \"50 mm\"", "core = \"toroid\"");
+        yield return Edited("core-figures-on-air", "turns = 84", "turns = 84\ninductance_factor = \"55n\"");
+        yield return Cored("geometry-on-a-core", "turns = 66", "turns = 66\npitch = \"0.6 mm\"");
+        yield return Cored("turn-length-without-wire", "turns = 66", "turns = 66\nturn_length = \"32 mm\"");
+        yield return Cored("q-above-the-wire", "q = { value = 200,", "wire_diameter = \"0.1 mm\"\nturn_length = \"32 mm\"\nq = { value = 900,");
+        yield return Cored("coupling-of-one", "section_coupling = 0.90", "section_coupling = 1");
+        yield return Cored("loop-on-a-core", "kind = \"rod\"", "kind = \"loop\"");
+        yield return Cored("rod-without-its-size", "rod = { diameter = \"10 mm\", permeability = 90 }", "rod = { permeability = 0.5 }");
+        yield return Edited("rod-on-an-air-coil", "kind = \"short-wire\"", "kind = \"rod\"\nrod = { diameter = \"10 mm\", permeability = 90 }");
+        yield return Edited("no-coupling-to-a-short-wire", "coupling = \"5p\"", "");
+        yield return Edited("long-wire-without-a-wire", "kind = \"short-wire\"", "kind = \"long-wire\"");
+        yield return Edited("long-wire-too-high", "capacitance = \"60p\"\nearth", "wire = { length = \"10 m\", height = \"12 m\" }\nearth", "kind = \"short-wire\"", "kind = \"long-wire\"");
     }
 }

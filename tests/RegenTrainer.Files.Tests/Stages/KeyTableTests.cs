@@ -17,12 +17,16 @@ public sealed class KeyTableTests
             text.Append($"\n## circuit = \"{family.Name}\"\n\n{family.Meaning}\n\n| key | meaning | value | default |\n| --- | --- | --- | --- |\n");
             foreach (Field field in family.Fields)
             {
-                text.Append($"| `{field.Key}` | {field.Meaning} | {Value(field)} | {Default(field)} |\n");
+                text.Append($"| `{field.Key}` | {field.Meaning}{Belonging(field)} | {Value(field)} | {Default(field)} |\n");
             }
         }
 
         Golden.CheckAt(text.ToString(), "docs", "stage-file-keys.md");
     }
+
+    private static string Belonging(Field field) => field.OnlyWith is { } only ? $" (only with {Words(only)})" : "";
+
+    private static string Words(FieldCondition condition) => $"`{condition.Key}` {string.Join(" or ", condition.Words.Select(word => $"`{word}`"))}";
 
     private static string Value(Field field) => field.Kind switch
     {
@@ -34,7 +38,7 @@ public sealed class KeyTableTests
     };
 
     private static string Default(Field field) =>
-        field.Required ? "must be given"
+        field.Required ? field.RequiredWith is { } with ? $"must be given with {Words(with)}" : "must be given"
         : field.Default is { } number ? QuantityText.Write(number, field.Unit)
         : field.DefaultText ?? "none";
 }

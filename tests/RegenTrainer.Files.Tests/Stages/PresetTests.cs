@@ -11,9 +11,14 @@ public sealed class PresetTests
     public static TheoryData<string> Names => [.. Presets.Names];
 
     [Fact]
-    public void Four_presets_ship()
+    public void Presets_ship_for_every_antenna_and_core()
     {
-        Assert.Equal(["plain-tank", "tapped-coil-follower-off", "tapped-coil-npn", "tapped-coil-pnp"], Presets.Names);
+        string[] ship =
+        [
+            "ferrite-rod", "frame-loop", "long-wave-ring", "long-wire", "plain-tank", "short-wave-ring", "tapped-coil-follower-off",
+            "tapped-coil-npn", "tapped-coil-pnp",
+        ];
+        Assert.Empty(ship.Except(Presets.Names));
         Assert.Contains(Presets.Default, Presets.Names);
     }
 
@@ -74,7 +79,8 @@ public sealed class PresetTests
         // Records compare their figures; a coil compares by what it computes.
         Windings w => string.Join(';', Enumerable.Range(0, w.Model.SectionCount).SelectMany(i =>
             Enumerable.Range(0, w.Model.SectionCount).Select(j => w.Model.Henry(i, j).ToString("R", System.Globalization.CultureInfo.InvariantCulture)))
-            .Concat(w.SectionNodes.Select(n => n.From + ">" + n.To))),
+            .Concat(w.SectionNodes.Select(n => n.From + ">" + n.To))
+            .Concat((w.PickUp?.Shares ?? []).Append(w.PickUp?.AreaSquareMetre ?? 0).Select(v => v.ToString("R", System.Globalization.CultureInfo.InvariantCulture)))),
         _ => part.ToString()!,
     };
 }

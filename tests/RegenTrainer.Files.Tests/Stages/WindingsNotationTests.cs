@@ -88,6 +88,61 @@ public sealed class WindingsNotationTests
         ReadsBack(part);
     }
 
+    [Fact]
+    public void A_winding_on_a_core_reads()
+    {
+        Windings part = Coil("""
+            inductance_factor = "170n"
+            turns = 108
+            taps = [5, 30]
+            nodes = ["earth", "emitter tap", "base tap", "top"]
+            section_coupling = 0.99
+            q = { value = 120, at = "200k" }
+            self_capacitance = "6p"
+            wire_diameter = "0.3 mm"
+            turn_length = "40 mm"
+            picks_up = { shares = [0.05, 0.25, 0.7], area = 0.5 }
+            """);
+
+        // L = A_L N^2 = 170 nH x 108^2 = 1.98288 mH.
+        double henry = Enumerable.Range(0, 3).Sum(i => Enumerable.Range(0, 3).Sum(j => part.Model.Henry(i, j)));
+        Assert.Equal(1.98288e-3, henry, 1e-14);
+        Assert.Equal([("earth", "emitter tap"), ("emitter tap", "base tap"), ("base tap", "top")], part.SectionNodes);
+        Assert.Equal([0.05, 0.25, 0.7], part.PickUp!.Shares);
+        ReadsBack(part);
+    }
+
+    public static TheoryData<string, string> WrongOnCores { get; } = new()
+    {
+        { "section_coupling = 1", "17:20: found 1, expected 0 to 0.999" },
+        { "section_coupling = 0.9\nself_capacitance = -1", "18:20: found -1, expected 0 F to 1 µF" },
+        { "section_coupling = 0.9\npicks_up = { shares = [1, 0] }", "18:23: found 2 shares, expected 1: one for each section" },
+        { "section_coupling = 0.9\npicks_up = { shares = [2] }", "18:24: found 2, expected a share from -1 to 1" },
+        {
+            "section_coupling = 0.9\nwire_diameter = \"0.01 mm\"\nturn_length = \"1 m\"",
+            "16:5: found a measured Q above what the wire alone leaves, expected a lower Q, or thicker wire"
+        },
+    };
+
+    [Theory]
+    [MemberData(nameof(WrongOnCores))]
+    public void Windings_on_cores_that_cannot_be_are_told_at_their_value(string lines, string message)
+    {
+        string text = $"{Frame}inductance_factor = \"170n\"\nturns = 108\nq = {{ value = 120, at = \"200k\" }}\n{lines}\nnodes = [\"earth\", \"top\"]\n";
+        FileFault fault = Assert.Single(StageText.Read(text, "w.toml", DeviceShelf.Shipped).Faults);
+        Assert.Equal("w.toml:" + message, fault.ToString());
+    }
+
+    [Theory]
+    [InlineData("length = 25, height = 30, diameter = 0.002", "13:32: found 30, expected at most the length of the wire")]
+    [InlineData("length = 25, height = 8, diameter = 0.9", "13:46: found 0.9, expected 0.01 mm to 100 mm")]
+    public void A_wire_that_cannot_hang_is_told_at_its_value(string wire, string message)
+    {
+        string text = Frame.Replace("kind = \"windings\"", $"kind = \"antenna\"\nwire = {{ {wire} }}", StringComparison.Ordinal) + "between = [\"top\", \"earth\"]\n";
+        FileFault fault = Assert.Single(StageText.Read(text, "w.toml", DeviceShelf.Shipped).Faults);
+        Assert.Equal("w.toml:" + message, fault.ToString());
+    }
+
     public static TheoryData<string, string> Wrong { get; } = new()
     {
         { "turns = 5001\nnodes = [\"earth\", \"top\"]", "16:9: found 5001, expected a whole number from 1 to 5000" },
@@ -149,6 +204,8 @@ public sealed class WindingsNotationTests
         string text = PartsText.Write(design with { ExtraParts = [design.ExtraParts[0], part] });
         Windings back = StageText.Read(text, "w", DeviceShelf.Shipped).Design!.ExtraParts.OfType<Windings>().Single();
         Assert.Equal(part.SectionNodes, back.SectionNodes);
+        Assert.Equal(part.PickUp?.Shares ?? [], back.PickUp?.Shares ?? []);
+        Assert.Equal(part.PickUp?.AreaSquareMetre, back.PickUp?.AreaSquareMetre);
         int count = part.Model.SectionCount;
         double[] first = new double[count * count], second = new double[count * count];
         part.Model.SeriesOhm(1e6, 20, first);

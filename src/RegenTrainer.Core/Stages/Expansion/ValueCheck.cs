@@ -45,6 +45,12 @@ internal static class ValueCheck
                         $"nodes for {windings.SectionNodes.Count} of the sections",
                         $"nodes for each of the {windings.Model.SectionCount} sections of the windings");
                     break;
+                case Windings { PickUp: { } pickUp } windings when pickUp.Shares.Count != windings.Model.SectionCount:
+                    faults.Add(
+                        CircuitCheck.Key(part),
+                        $"{pickUp.Shares.Count} shares of the antenna's electromotive force",
+                        $"one for each of the {windings.Model.SectionCount} sections of the windings");
+                    break;
                 default:
                     break;
             }

@@ -32,8 +32,14 @@ public sealed class PlainTank : Family
     public override IReadOnlyList<FieldFault> Check(StageDesign design)
     {
         FaultList faults = new();
+        if (!ChoiceCheck.Check(design, faults))
+        {
+            return faults.Faults;
+        }
+
         DialFields.Check(design, faults);
         FactorFields.Check(design, faults);
+        AntennaFields.Check(design, faults);
         RangeFields.Check(design, null, faults);
         CircuitCheck.CheckExpansion(this, design, faults);
         return faults.Faults;

@@ -29,7 +29,7 @@ public sealed class TappedCoil : Family
                 .. BiasFields.Devices,
                 .. BiasFields.Feed,
                 .. RegenerationFields.All,
-                .. AntennaFields.All,
+                .. CoilAntennaFields.All,
                 .. OutputFields.All,
                 .. LayoutFields.All,
                 .. RangeFields.Supply,
@@ -46,10 +46,16 @@ public sealed class TappedCoil : Family
     public override IReadOnlyList<FieldFault> Check(StageDesign design)
     {
         FaultList faults = new();
+        if (!ChoiceCheck.Check(design, faults))
+        {
+            return faults.Faults;
+        }
+
         DialFields.Check(design, faults);
         CoilFields.Check(design, faults);
         BiasFields.Check(design, faults);
         PotentiometerFields.Check(design, faults);
+        CoilAntennaFields.Check(design, faults);
         OutputFields.Check(design, faults);
         RangeFields.Check(design, design.Number(BiasFields.Supply), faults);
         CircuitCheck.CheckExpansion(this, design, faults);

@@ -5,7 +5,7 @@ using RegenTrainer.Core.Stages.Expansion;
 
 namespace RegenTrainer.Core.Stages.Fields;
 
-/// <summary>A single-layer coil with an emitter tap and a base tap, counted from the earthed end.</summary>
+/// <summary>A coil with an emitter tap and a base tap, counted from the earthed end: a single layer on a form, or wound on a core.</summary>
 public static class CoilFields
 {
     /// <summary>Outer diameter of the form.</summary>
@@ -41,19 +41,30 @@ public static class CoilFields
     /// <summary>The fields, in the order of the documentation.</summary>
     public static IReadOnlyList<Field> All { get; } =
     [
-        FieldOf.Length(FormDiameter, "outer diameter of the form", 1e-3, 1) with { Required = true },
-        FieldOf.Length(WireDiameter, "diameter of the bare copper", 0.02e-3, 10e-3) with { Required = true },
-        FieldOf.Length(WireOverInsulation, "diameter of the wire over its insulation; 1.1 times the copper where not given", 0.02e-3, 20e-3),
-        FieldOf.Length(Pitch, "distance from turn to turn; close wound where not given", 0.02e-3, 0.1),
+        CoredCoilFields.CoreKind,
+        FieldOf.Length(FormDiameter, "outer diameter of the form", 1e-3, 1) with { Required = true, OnlyWith = CoredCoilFields.WithAir },
+        FieldOf.Length(WireDiameter, "diameter of the bare copper", 0.02e-3, 10e-3) with { Required = true, RequiredWith = CoredCoilFields.WithAir },
+        FieldOf.Length(WireOverInsulation, "diameter of the wire over its insulation; 1.1 times the copper where not given", 0.02e-3, 20e-3) with
+        {
+            OnlyWith = CoredCoilFields.WithAir,
+        },
+        FieldOf.Length(Pitch, "distance from turn to turn; close wound where not given", 0.02e-3, 0.1) with { OnlyWith = CoredCoilFields.WithAir },
         FieldOf.Turns(Turns, "turns of the whole coil"),
         FieldOf.Turns(EmitterTap, "turns from the earthed end to the emitter tap"),
         FieldOf.Turns(BaseTap, "turns from the earthed end to the base tap"),
         FieldOf.Quality(FormLossQ, "Q that the losses of form and insulation alone would leave; none where not given") with
         {
             Tolerance = ToleranceKind.CoilQ,
+            OnlyWith = CoredCoilFields.WithAir,
         },
-        FieldOf.Quality(MeasuredQ, "measured Q of the coil; computed where not given") with { Tolerance = ToleranceKind.CoilQ },
-        FieldOf.Frequency(MeasuredQAt, "frequency of the measured Q"),
+        FieldOf.Quality(MeasuredQ, "measured Q of the coil; that of an air-cored one is computed where not given") with
+        {
+            Tolerance = ToleranceKind.CoilQ,
+            Required = true,
+            RequiredWith = CoredCoilFields.WithCore,
+        },
+        FieldOf.Frequency(MeasuredQAt, "frequency of the measured Q") with { Required = true, RequiredWith = CoredCoilFields.WithCore },
+        .. CoredCoilFields.All,
     ];
 
     /// <summary>Adds the coil from earth over its taps to the top of the tank.</summary>
@@ -71,7 +82,13 @@ public static class CoilFields
             below = node;
         }
 
-        parts.Add(new Windings("coil", sections, BuildCoil(design, [.. taps.Select(t => t.Turns)])));
+        int[] tapTurns = [.. taps.Select(t => t.Turns)];
+        int[] sectionTurns = [.. tapTurns.Append(TurnsOf(design, Turns)).Zip(tapTurns.Prepend(0), (end, start) => end - start)];
+        Coil? air = CoredCoilFields.IsAir(design) ? BuildCoil(design, tapTurns) : null;
+        parts.Add(new Windings("coil", sections, air is null ? CoredCoilFields.Build(design, tapTurns) : air)
+        {
+            PickUp = CoilAntennaFields.PickUp(design, sectionTurns, air?.Geometry[0].RadiusMetre ?? 0),
+        });
     }
 
     /// <summary>Adds a fault for every tap off the coil and for wire that does not fit its pitch.</summary>
@@ -88,6 +105,12 @@ public static class CoilFields
                     : $"1 to {turns - 1} turns, so that a turn of the coil's {turns} stays above the tap";
                 faults.Add(key, $"a tap at {FaultList.Quantity(tap, Unit.None)} turns", expected);
             }
+        }
+
+        if (!CoredCoilFields.IsAir(design))
+        {
+            CoredCoilFields.Check(design, faults);
+            return;
         }
 
         CheckWire(design, faults);

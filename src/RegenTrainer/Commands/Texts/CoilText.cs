@@ -15,6 +15,7 @@ internal static class CoilText
         sheet.Line(title);
         sheet.Row("at", Say.Quantity(coil.AtHz, Unit.Hertz, 7));
         sheet.Row("temperature", Say.Quantity(coil.TemperatureCelsius, Unit.Celsius));
+        sheet.RowIf("effective height", coil.EffectiveHeightMetre is { } height ? Say.Quantity(height, Unit.Metre) : null);
         foreach (WindingReading winding in coil.Windings)
         {
             sheet.Gap();

@@ -8,7 +8,13 @@ namespace RegenTrainer.Commands.Texts;
 /// <summary>A run along the dial for the eye.</summary>
 internal static class DialText
 {
-    public static string Of(string title, SettingInForce setting, double? stationHz, IReadOnlyList<DialPoint> points, IReadOnlyList<Caution> cautions)
+    public static string Of(
+        string title,
+        SettingInForce setting,
+        double? stationHz,
+        IReadOnlyList<DialPoint> points,
+        (double? LowHz, double? HighHz) reach,
+        IReadOnlyList<Caution> cautions)
     {
         var sheet = new Sheet();
         sheet.Line(title);
@@ -16,6 +22,12 @@ internal static class DialText
         sheet.RowIf("station", stationHz is { } hz ? Say.Quantity(hz, Unit.Hertz, 7) : null);
         sheet.Row("travel", $"{Say.Quantity(setting.TravelPercent, Unit.None)} %");
         ReadingText.Socket(sheet, setting);
+        sheet.Row("capacitor reaches", $"{Say.Quantity(reach.LowHz, Unit.Hertz)} to {Say.Quantity(reach.HighHz, Unit.Hertz)}");
+        foreach (DeadSpot spot in DeadSpot.Along(points))
+        {
+            sheet.Row("dead spot", $"{Say.Kilohertz(spot.FromHz)} to {Say.Kilohertz(spot.ToHz)} kHz: {Word(spot.Reason)}");
+        }
+
         sheet.Gap();
         sheet.Table(
             ["dial kHz", "tuned pF", "tips over %", "effective Q", "bandwidth Hz", "gain dB", "pulled Hz"],
@@ -23,6 +35,16 @@ internal static class DialText
             wordsFirst: false);
         return sheet.Cautions(cautions).ToString();
     }
+
+    private static string Word(DeadSpotReason reason) => reason switch
+    {
+        DeadSpotReason.OutOfReach => "out of reach",
+        DeadSpotReason.AlwaysOscillates => "always oscillates",
+        DeadSpotReason.OscillatesAtIdle => "oscillates at idle",
+        DeadSpotReason.TipsOverBeyondTravel => "tips over beyond the travel",
+        DeadSpotReason.NeverTipsOver => "never tips over",
+        _ => "unsolved",
+    };
 
     private static string[] Row(DialPoint point) => point.Reachable
         ?

@@ -5,10 +5,10 @@ using Terminal.Gui.Input;
 namespace RegenTrainer.Screens.Pages;
 
 /// <summary>Page 8: the operating point.</summary>
-internal sealed class BiasView(Bench bench) : IPage
+internal sealed class BiasView(Bench bench) : IPage, IDisposable
 {
-    private readonly LatestRequest<StageRequest, BiasAnswer> _answers = new(BiasAnswer.Of);
-    private readonly LatestRequest<StageRequest, BiasAnswer> _pinnedAnswers = new(BiasAnswer.Of);
+    private readonly LatestRequest<StageRequest, BiasAnswer> _answers = new((request, _) => BiasAnswer.Of(request), cutShort: false);
+    private readonly LatestRequest<StageRequest, BiasAnswer> _pinnedAnswers = new((request, _) => BiasAnswer.Of(request), cutShort: false);
     private bool _nodes;
 
     /// <inheritdoc/>
@@ -32,8 +32,8 @@ internal sealed class BiasView(Bench bench) : IPage
             _pinnedAnswers.Ask(new StageRequest(pinned.Solver, pinned.Stage.Setting));
         }
 
-        BiasAnswer? against = bench.Pinned is null ? null : _pinnedAnswers.Latest?.Answer;
-        BiasPage.Draw(canvas, region, new BiasPicture(_answers.Latest?.Answer, _answers.IsWorking, against, _nodes));
+        BiasAnswer? against = bench.Pinned is null ? null : _pinnedAnswers.Latest?.Result;
+        BiasPage.Draw(canvas, region, new BiasPicture(_answers.Latest?.Result, _answers.IsWorking, against, _nodes));
     }
 
     /// <inheritdoc/>
@@ -49,4 +49,11 @@ internal sealed class BiasView(Bench bench) : IPage
 
     /// <inheritdoc/>
     public bool Poll() => _answers.Poll() | _pinnedAnswers.Poll();
+
+    /// <inheritdoc/>
+    public void Dispose()
+    {
+        _answers.Dispose();
+        _pinnedAnswers.Dispose();
+    }
 }

@@ -5,12 +5,12 @@ using Terminal.Gui.Input;
 namespace RegenTrainer.Screens.Pages;
 
 /// <summary>Page 2: along the whole dial.</summary>
-internal sealed class DialView(Bench bench) : IPage
+internal sealed class DialView(Bench bench) : IPage, IDisposable
 {
     private const int PageSteps = 10;
 
-    private readonly LatestRequest<StageRequest, DialCurves> _sweep = new(DialSweep.Run);
-    private readonly LatestRequest<StageRequest, DialCurves> _pinnedSweep = new(DialSweep.Run);
+    private readonly LatestRequest<StageRequest, DialCurves> _sweep = new((request, _) => DialSweep.Run(request), cutShort: false);
+    private readonly LatestRequest<StageRequest, DialCurves> _pinnedSweep = new((request, _) => DialSweep.Run(request), cutShort: false);
     private int _quantity;
     private int? _cursor;
 
@@ -49,7 +49,7 @@ internal sealed class DialView(Bench bench) : IPage
             return true;
         }
 
-        if (_sweep.Latest?.Answer is not { } curves)
+        if (_sweep.Latest?.Result is not { } curves)
         {
             return false;
         }
@@ -82,11 +82,18 @@ internal sealed class DialView(Bench bench) : IPage
     /// <inheritdoc/>
     public bool Poll() => _sweep.Poll() | _pinnedSweep.Poll();
 
+    /// <inheritdoc/>
+    public void Dispose()
+    {
+        _sweep.Dispose();
+        _pinnedSweep.Dispose();
+    }
+
     private DialPicture Picture()
     {
-        DialCurves? curves = _sweep.Latest?.Answer;
+        DialCurves? curves = _sweep.Latest?.Result;
         return new DialPicture(
-            curves, _sweep.IsWorking, bench.Pinned is null ? null : _pinnedSweep.Latest?.Answer, _quantity, curves is null ? 0 : Cursor(curves));
+            curves, _sweep.IsWorking, bench.Pinned is null ? null : _pinnedSweep.Latest?.Result, _quantity, curves is null ? 0 : Cursor(curves));
     }
 
     /// <summary>The point under the cursor; the nearest to the dial until it is moved.</summary>
