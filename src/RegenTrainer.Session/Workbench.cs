@@ -252,7 +252,7 @@ public sealed class Workbench : IDisposable
 
         string old = Found!.StoredIn;
         Begin(new StageDocument(design, content.Text, content.Path, content.Name), content.Fingerprint);
-        _keeper.Taken(old, Content());
+        _keeper.Taken(old, Unsaved());
     }
 
     /// <summary>Deletes the work found; the next older one, if any, is found then.</summary>
@@ -262,10 +262,13 @@ public sealed class Workbench : IDisposable
     /// Does what is due, about once each turn of the screen: keeps unsaved work within a second of an edit, looks at most once a
     /// second whether the file changed on disk, and takes up what came of both. It never waits for a disk.
     /// </summary>
-    public void Tick() => _keeper.Tick(IsChanged ? Content : null);
+    public void Tick() => _keeper.Tick(IsChanged ? Unsaved() : null);
+
+    /// <summary>Lets go of the notice, read by the builder.</summary>
+    public void DismissNotice() => _keeper.Dismiss();
 
     /// <summary>Keeps unsaved work now, and leaves it for the next start: for an end that nobody asked for.</summary>
-    public void LeaveRecovery() => _keeper.LeaveBehind(IsChanged ? Content() : null);
+    public void LeaveRecovery() => _keeper.LeaveBehind(IsChanged ? Unsaved() : null);
 
     /// <summary>Ends cleanly: what was kept for recovery is removed, unless <see cref="LeaveRecovery"/> left it.</summary>
     public void Dispose() => _keeper.Dispose();
@@ -278,6 +281,7 @@ public sealed class Workbench : IDisposable
         Model = StageModel.Compile(document.Design);
         Stage.Replace(new StageSolver(Model, _audioHz), sameFile ? Stage.Setting : Hands(Stage.Setting, Model.Circuit.Dial));
         IsChanged = !_file.TextIsInFile;
+        DismissNotice();
         _keeper.Edited();
         _keeper.Begin(document.Path, fingerprint);
     }
@@ -307,6 +311,7 @@ public sealed class Workbench : IDisposable
         if (answer.Outcome == FileOutcome.Done)
         {
             IsChanged = false;
+            DismissNotice();
             _keeper.Edited();
             _keeper.Begin(Document.Path, _file.Fingerprint);
         }
@@ -335,6 +340,12 @@ public sealed class Workbench : IDisposable
         Design.Values.GetValueOrDefault(field.Key)
         ?? (field.Default is { } number ? FieldValue.Of(number) : field.DefaultText is { } word ? FieldValue.Of(word) : null);
 
-    private RecoveryContent Content() => new(
-        Document.Name, Document.Path, _around.Clock.GetUtcNow(), _around.Process, _file.Fingerprint, StageText.Write(Document.Text, Design));
+    /// <summary>The unsaved work as it is now; its text is worked out by the one who asks, on whatever thread.</summary>
+    private Func<RecoveryContent> Unsaved()
+    {
+        (StageDocument document, StageDesign design, string fingerprint) = (Document, Design, _file.Fingerprint);
+        DateTimeOffset at = _around.Clock.GetUtcNow();
+        return () => new RecoveryContent(
+            document.Name, document.Path, at, _around.Process, fingerprint, StageText.Write(document.Text, design));
+    }
 }

@@ -145,6 +145,9 @@ public sealed class WorkbenchFileTests : IDisposable
         _place.Clock.Go(1);
         Workplace.Until(bench, () => bench.Notice.Length > 0);
         Assert.Equal($"{path} was changed by another program; saving will ask first", bench.Notice);
+        File.WriteAllText(path, Presets.Text(Presets.Default));
+        _place.Clock.Go(1);
+        Workplace.Until(bench, () => bench.Notice.Length == 0);
         File.Delete(path);
         _place.Clock.Go(1);
         Workplace.Until(bench, () => bench.Notice.EndsWith("is no longer there; saving writes it anew", StringComparison.Ordinal));

@@ -16,6 +16,7 @@ internal sealed class OpenRecords(Surroundings around)
 
     private readonly int _session = Interlocked.Increment(ref _sessions);
     private string? _own;
+    private string? _path;
 
     /// <summary>Puts down that this session has a file open, and no longer the one before.</summary>
     /// <param name="path">Its full path; null for no file.</param>
@@ -23,7 +24,13 @@ internal sealed class OpenRecords(Surroundings around)
     public bool TryTake(string? path, out string reason)
     {
         reason = "";
+        if (_own is not null && path == _path)
+        {
+            return true;
+        }
+
         Release();
+        _path = path;
         if (around.Places.State is not { } folder)
         {
             return true;   // told once, at the start

@@ -20,6 +20,7 @@ internal sealed class WorkKeeper : IDisposable
     private readonly Queue<(Recovery Found, RecoveryContent Content)> _left;
     private FileWatch? _watch;
     private string? _path;
+    private string _seen = "";
     private long? _editedAt;
     private long _lookedAt;
     private bool _looking;
@@ -86,8 +87,7 @@ internal sealed class WorkKeeper : IDisposable
         if (_editedAt is { } since && _around.Clock.GetElapsedTime(since) >= _keepAfter)
         {
             _editedAt = null;
-            RecoveryContent? kept = content?.Invoke();
-            _work.Post(() => Keep(kept));
+            _work.Post(() => Keep(content));
         }
 
         if (_watch is { } watch && !_looking && _around.Clock.GetElapsedTime(_lookedAt) >= _lookEvery)
@@ -99,7 +99,7 @@ internal sealed class WorkKeeper : IDisposable
                 return () =>
                 {
                     _looking = false;
-                    Tell(ReferenceEquals(watch, _watch) ? seen : null);
+                    Seen(ReferenceEquals(watch, _watch) ? seen : null);
                 };
             });
         }
@@ -113,12 +113,12 @@ internal sealed class WorkKeeper : IDisposable
     }
 
     /// <summary>Has the recovery found kept under this session's name, and only then deletes it.</summary>
-    public void Taken(string storedIn, RecoveryContent content)
+    public void Taken(string storedIn, Func<RecoveryContent> content)
     {
         _left.Dequeue();
         _work.Post(() =>
         {
-            if (!_recoveries.TryKeep(content, out string notice))
+            if (!_recoveries.TryKeep(content(), out string notice))
             {
                 return () => Tell(notice);
             }
@@ -127,6 +127,8 @@ internal sealed class WorkKeeper : IDisposable
             return null;
         });
     }
+
+    public void Dismiss() => Notice = "";
 
     public void Drop()
     {
@@ -140,7 +142,7 @@ internal sealed class WorkKeeper : IDisposable
         }
     }
 
-    public void LeaveBehind(RecoveryContent? content)
+    public void LeaveBehind(Func<RecoveryContent>? content)
     {
         _leaving = true;
         _work.Post(() => Keep(content));
@@ -168,7 +170,7 @@ internal sealed class WorkKeeper : IDisposable
         _work.Finish(_longestEnd);
     }
 
-    private Action? Keep(RecoveryContent? content)
+    private Action? Keep(Func<RecoveryContent>? content)
     {
         if (content is null)
         {
@@ -176,7 +178,18 @@ internal sealed class WorkKeeper : IDisposable
             return null;
         }
 
-        return _recoveries.TryKeep(content, out string notice) ? null : () => Tell(notice);
+        return _recoveries.TryKeep(content(), out string notice) ? null : () => Tell(notice);
+    }
+
+    /// <summary>Tells what the watch saw; what it told before is no longer true.</summary>
+    private void Seen(string? notice)
+    {
+        if (notice is not null)
+        {
+            Notice = Notice == _seen ? "" : Notice;
+            _seen = notice;
+            Tell(notice);
+        }
     }
 
     private void Tell(string? notice) => Notice = string.IsNullOrEmpty(notice) ? Notice : notice;

@@ -29,7 +29,7 @@ public sealed class GeneratedFileTests
             Assert.True(text == StageText.Write(text, read), text);
 
             (string key, FieldValue value) = design.Values.ElementAt(k * 7 % design.Values.Count);
-            if (value.Number is { } number && design.Family.FieldFor(key)!.Kind == FieldKind.Quantity)
+            if (value.Number is { } number and not 0 && design.Family.FieldFor(key)!.Kind == FieldKind.Quantity)
             {
                 StageDesign other = read.With(key, value with { Number = number * 1.01 });
                 string written = StageText.Write(text, other);
