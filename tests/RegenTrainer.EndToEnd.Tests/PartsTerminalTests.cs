@@ -136,7 +136,7 @@ public sealed class PartsTerminalTests
         terminal.WaitFor("has no file yet");
         terminal.Type("/proc/own.toml");
         terminal.Keys("Enter");
-        terminal.WaitFor("/proc/own.toml is not written");
+        terminal.WaitFor("/proc/own.toml is no place for files");
         terminal.Keys("Escape");
         terminal.WaitFor("= 80");
         terminal.Type("q");

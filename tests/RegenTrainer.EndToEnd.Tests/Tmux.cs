@@ -57,7 +57,7 @@ internal sealed class Tmux : IDisposable
     public void Keys(params string[] keys) => Tell(["send-keys", "-t", "run", .. keys]);
 
     /// <summary>Types characters as they are.</summary>
-    public void Type(string text) => Tell("send-keys", "-t", "run", "-l", text);
+    public void Type(string text) => Tell("send-keys", "-t", "run", "-l", "--", text);
 
     public void Resize(int columns, int rows) => Tell("resize-window", "-t", "run", "-x", Text(columns), "-y", Text(rows));
 

@@ -33,7 +33,6 @@ internal sealed class EntryField : TextField
         X = Pos.Func(_ => Place.Left);
         Y = Pos.Func(_ => Place.Top);
         Width = Dim.Func(_ => Place.Width);
-        ContextMenu?.Dispose();
         ValueChanged += (_, _) =>
         {
             if (!_showing)
@@ -57,6 +56,7 @@ internal sealed class EntryField : TextField
         bool opens = entry != _entry;
         (_entry, _showing) = (entry, true);
         Text = entry?.Text ?? "";
+        ClearHistoryChanges();
         _showing = false;
         Visible = entry is not null;
         if (entry is null)
@@ -77,8 +77,13 @@ internal sealed class EntryField : TextField
         SuperView?.SetNeedsDraw();
     }
 
-    /// <summary>What moves in lists, takes and leaves is the panel's; the rest is text.</summary>
-    protected override bool OnKeyDown(Key key) => Array.IndexOf(_others, key) >= 0 ? _press(key) : base.OnKeyDown(key);
+    /// <summary>What moves in lists, takes and leaves is the panel's; the rest is text. The library's own menu stays closed.</summary>
+    protected override bool OnKeyDown(Key key) =>
+        Array.IndexOf(_others, key) >= 0 ? _press(key) : key == Key.F10.WithShift || base.OnKeyDown(key);
+
+    /// <inheritdoc/>
+    protected override bool OnMouseEvent(Mouse mouse) =>
+        (mouse.Flags & (MouseFlags.RightButtonPressed | MouseFlags.RightButtonReleased | MouseFlags.RightButtonClicked)) != 0 || base.OnMouseEvent(mouse);
 
     /// <inheritdoc/>
     protected override bool OnGettingAttributeForRole(in VisualRole role, ref Attribute currentAttribute)

@@ -103,6 +103,20 @@ public sealed class PartsPanelTests
         Assert.Equal(1010e3, work.Bench.Stage.Setting.DialHz);
     }
 
+    [Fact]
+    public void The_library_has_no_menu_of_its_own_to_show_in_a_field()
+    {
+        using var work = new WorkedStage();
+        work.GoTo("coil.turns");
+        work.Terminal.Press(Key.Enter);
+        string before = work.Text;
+        work.Terminal.Press(Key.F10.WithShift, Key.Z.WithCtrl);
+        work.Terminal.Move(30, work.Terminal.Rows.ToList().FindIndex(row => row.Contains("\u25b8 turns", StringComparison.Ordinal)), MouseFlags.RightButtonClicked);
+        Assert.Equal(before, work.Text);
+        work.Terminal.Press(Key.Esc, Key.Esc);
+        Assert.False(work.IsStopped);
+    }
+
     [Theory]
     [InlineData("coil.turns", "0", "1 to 5000")]
     [InlineData("coil.taps.base", "84", "1 to 83 turns")]

@@ -9,7 +9,7 @@ using Glyphs = RegenTrainer.Drawing.Glyphs;
 namespace RegenTrainer.Tests.Screens;
 
 /// <summary>
-/// Keys, typed characters, mouse events and resizes at random, repeatable from a seed; of the keys only those that write files or
+/// Keys, typed characters, mouse events and resizes at random, repeatable from a seed; of the keys only those that lead to writing files or
 /// end the program are left out.
 /// </summary>
 internal sealed class RandomHands : IDisposable
@@ -34,7 +34,7 @@ internal sealed class RandomHands : IDisposable
         MouseFlags.LeftButtonPressed | MouseFlags.PositionReport,
     ];
 
-    private const string Characters = "12381238epp?ttnmNM,.<>[]{}=vVcCdlurro+-0.5k";
+    private const string Characters = "12381238epp?ttnmNM,.<>[]{}=vVcCdlurr+-0.5k";
 
     private readonly BenchScreen _screen;
     private readonly HeadlessTerminal _terminal;
