@@ -83,7 +83,7 @@ internal sealed class EntryField : TextField
 
     /// <inheritdoc/>
     protected override bool OnMouseEvent(Mouse mouse) =>
-        (mouse.Flags & (MouseFlags.RightButtonPressed | MouseFlags.RightButtonReleased | MouseFlags.RightButtonClicked)) != 0 || base.OnMouseEvent(mouse);
+        (mouse.Flags & (MouseFlags.RightButtonPressed | MouseFlags.RightButtonReleased | MouseFlags.RightButtonClicked)) != MouseFlags.None || base.OnMouseEvent(mouse);
 
     /// <inheritdoc/>
     protected override bool OnGettingAttributeForRole(in VisualRole role, ref Attribute currentAttribute)
