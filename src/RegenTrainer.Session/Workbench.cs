@@ -81,7 +81,7 @@ public sealed class Workbench : IDisposable
         }
 
         // A value and the condition it holds at make sense together only: they go together.
-        return value is null && Condition(key) is { } at && Design.Gives(at.Key)
+        return value is null && TypedChange.Condition(Design, key) is { } at && Design.Gives(at.Key)
             && FieldCheck.Refusal(at, null) is null && TryChangeTogether([(key, null), (at.Key, null)], out refusal);
     }
 
@@ -120,26 +120,12 @@ public sealed class Workbench : IDisposable
             return TryChange(key, null, out refusal);
         }
 
-        string? condition = null;
-        int at = text.IndexOf(" at ", StringComparison.OrdinalIgnoreCase);
-        if (Condition(key) is { } conditionField && at > 0)
-        {
-            (text, condition) = (text[..at], text[(at + 4)..]);
-            if (!TypedValue.TryRead(conditionField, condition, Shelf, out FieldValue? typed, out refusal))
-            {
-                refusal = $"behind \"at\", {refusal}";
-                return false;
-            }
-
-            return TypedValue.TryRead(field, text, Shelf, out FieldValue? first, out refusal)
-                && TryChangeTogether([(key, Keeping(field, first!)), (conditionField.Key, typed)], out refusal);
-        }
-
-        return TypedValue.TryRead(field, text, Shelf, out FieldValue? value, out refusal) && TryChange(key, Keeping(field, value!), out refusal);
+        return TypedChange.TryRead(Design, field, text, Shelf, out IReadOnlyList<(string Key, FieldValue? Value)> changes, out refusal)
+            && TryChangeTogether(changes, out refusal);
     }
 
     /// <summary>The value in force as it is typed, so that <see cref="TryType"/> reads it as it is; empty where there is none.</summary>
-    public string Typed(string key) => Design.Family.FieldFor(key) is { } field && InForce(field) is { } value ? TypedValue.Write(field, value) : "";
+    public string Typed(string key) => Design.Family.FieldFor(key) is { } field ? TypedChange.Write(Design, field) : "";
 
     /// <summary>
     /// Changes one value by a step: along the field's preferred series (IEC 60063), a turn, the next word or device that can stand
@@ -155,33 +141,20 @@ public sealed class Workbench : IDisposable
             return TryChange(key, null, out refusal);
         }
 
-        switch (field.Kind)
+        string first = "";
+        IEnumerable<FieldValue> steps = FieldSteps.From(Design, field, up, Shelf, out string none);
+        foreach (FieldValue next in steps)
         {
-            case FieldKind.Pairs:
-                refusal = "a table of pairs has no steps: type it";
-                return false;
-            case FieldKind.Choice:
-                return TryWords(field, FieldSteps.Words(field.Choices, Design.WordOrNull(key), up), out refusal);
-            case FieldKind.Device:
-                return TryWords(field, FieldSteps.Words(Shelf.Names, Design.WordOrNull(key), up), out refusal);
-            default:
-                break;
+            if (TryChange(key, TypedChange.WithTolerance(Design, field, next), out refusal))
+            {
+                return true;
+            }
+
+            first = first.Length == 0 ? refusal : first;
         }
 
-        if (Design.NumberOrNull(key) is not { } number)
-        {
-            refusal = "nothing is given to step from: type a value";
-            return false;
-        }
-
-        if (FieldSteps.Number(field, number, up) is not { } next)
-        {
-            refusal = $"no step {(up ? "above" : "below")} {QuantityText.Write(number, field.Unit, 6)} within "
-                + $"{QuantityText.Write(field.Minimum, field.Unit, 6)} to {QuantityText.Write(field.Maximum, field.Unit, 6)}";
-            return false;
-        }
-
-        return TryChange(key, Keeping(field, FieldValue.Of(next)), out refusal);
+        refusal = first.Length == 0 ? none : first;
+        return false;
     }
 
     /// <summary>The names on the shelf that can stand in a device field as the design is now.</summary>
@@ -320,37 +293,6 @@ public sealed class Workbench : IDisposable
 
         return answer;
     }
-
-    private bool TryWords(Field field, IEnumerable<string> words, out string refusal)
-    {
-        string first = "";
-        foreach (string word in words)
-        {
-            if (TryChange(field.Key, FieldValue.Of(word), out refusal))
-            {
-                return true;
-            }
-
-            first = first.Length == 0 ? refusal : first;
-        }
-
-        refusal = first.Length == 0 ? "there is no other to step to" : first;
-        return false;
-    }
-
-    /// <summary>A value with the tolerance its field has been given, unless it brings one of its own.</summary>
-    private FieldValue Keeping(Field field, FieldValue value) =>
-        field.Kind == FieldKind.Quantity && value.TolerancePercent is null && Design.Values.TryGetValue(field.Key, out FieldValue? given)
-            ? value with { TolerancePercent = given.TolerancePercent }
-            : value;
-
-    private FieldValue? InForce(Field field) =>
-        Design.Values.GetValueOrDefault(field.Key)
-        ?? (field.Default is { } number ? FieldValue.Of(number) : field.DefaultText is { } word ? FieldValue.Of(word) : null);
-
-    /// <summary>The field of the condition a value holds at: <c>coil.q.at</c> for <c>coil.q.value</c>.</summary>
-    private Field? Condition(string key) =>
-        key.EndsWith(".value", StringComparison.Ordinal) ? Design.Family.FieldFor(key[..^"value".Length] + "at") : null;
 
     /// <summary>The unsaved work as it is now; its text is worked out by the one who asks, on whatever thread.</summary>
     private Func<RecoveryContent> Unsaved()
