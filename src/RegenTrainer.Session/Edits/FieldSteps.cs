@@ -1,6 +1,7 @@
 using System.Globalization;
 using RegenTrainer.Core.Quantities;
 using RegenTrainer.Core.Stages;
+using RegenTrainer.Files.Devices;
 
 namespace RegenTrainer.Session.Edits;
 
@@ -13,11 +14,40 @@ internal static class FieldSteps
     /// <summary>From nothing, a value begins at this share of its range, if no series says where.</summary>
     private const double FirstShare = 1e-3;
 
+    /// <summary>The values a step leads to, the nearest first: one of a number, all others of a word or device.</summary>
+    /// <param name="design">The design.</param>
+    /// <param name="field">The field.</param>
+    /// <param name="up">Upward, or to the next; downward, or to the one before.</param>
+    /// <param name="shelf">Where devices are.</param>
+    /// <param name="none">Why there is no step, where there is none.</param>
+    public static IEnumerable<FieldValue> From(StageDesign design, Field field, bool up, DeviceShelf shelf, out string none)
+    {
+        none = "there is no other to step to";
+        switch (field.Kind)
+        {
+            case FieldKind.Choice:
+                return Words(field.Choices, design.WordOrNull(field.Key), up).Select(FieldValue.Of);
+            case FieldKind.Device:
+                return Words(shelf.Names, design.WordOrNull(field.Key), up).Select(FieldValue.Of);
+            case FieldKind.Pairs:
+                none = "a table of pairs has no steps: type it";
+                return [];
+            default:
+                break;
+        }
+
+        if (design.NumberOrNull(field.Key) is not { } number)
+        {
+            none = "nothing is given to step from: type a value";
+            return [];
+        }
+
+        none = $"no step {(up ? "above" : "below")} {Shown(field, number)} within {Shown(field, field.Minimum)} to {Shown(field, field.Maximum)}";
+        return Number(field, number, up) is { } next ? [FieldValue.Of(next)] : [];
+    }
+
     /// <summary>The number after one step up or down, kept in the field's range; null where there is none further.</summary>
-    /// <param name="field">A quantity or a count.</param>
-    /// <param name="number">The number in force.</param>
-    /// <param name="up">Upward or downward.</param>
-    public static double? Number(Field field, double number, bool up)
+    private static double? Number(Field field, double number, bool up)
     {
         double next = field switch
         {
@@ -36,7 +66,7 @@ internal static class FieldSteps
     }
 
     /// <summary>The words next to the present one, nearest first, all the way round.</summary>
-    public static IEnumerable<string> Words(IReadOnlyList<string> words, string? present, bool up)
+    private static IEnumerable<string> Words(IReadOnlyList<string> words, string? present, bool up)
     {
         int found = words.ToList().FindIndex(w => string.Equals(w, present, StringComparison.OrdinalIgnoreCase));
         int at = found < 0 && !up ? words.Count : found;
@@ -52,6 +82,8 @@ internal static class FieldSteps
 
     /// <summary>The smallest value above 0 that a step reaches: one of the unit where a series says what is offered.</summary>
     private static double First(Field field) => field.Series is null ? ThreeFigures(field.Maximum * FirstShare) : Math.Min(1, field.Maximum);
+
+    private static string Shown(Field field, double number) => QuantityText.Write(number, field.Unit, 6);
 
     private static double ThreeFigures(double number) =>
         double.Parse(number.ToString("E2", CultureInfo.InvariantCulture), NumberStyles.Float, CultureInfo.InvariantCulture);

@@ -20,7 +20,7 @@ internal sealed class RandomHands : IDisposable
     private const int MostRows = 55;
 
     /// <summary>Frames after which memory should no longer grow.</summary>
-    private const int WarmUp = 200;
+    private const int WarmUp = 100;
 
     private static readonly Key[] _keys =
     [

@@ -13,8 +13,8 @@ public sealed class RandomHandsTests
     public void A_hundred_thousand_random_events_leave_every_frame_within_the_width()
     {
         using var hands = new RandomHands(new Bench(new LiveStage(new MadeUpStage((60, true)), new Setting(1e6, 40))), seed: 20261201);
-        hands.Run(events: 100_000, eventsPerFrame: 25);
-        Assert.Equal(4000, hands.Frames);
+        hands.Run(events: 100_000, eventsPerFrame: 100);
+        Assert.Equal(1000, hands.Frames);
         Assert.True(hands.GrowthBytes < 8 << 20, $"{hands.GrowthBytes} bytes more");
     }
 
@@ -23,7 +23,7 @@ public sealed class RandomHandsTests
     {
         using var stage = new WorkedStage(preset: true);
         using var hands = new RandomHands(stage.Bench, seed: 7);
-        hands.Run(events: 3000, eventsPerFrame: 6);
-        Assert.Equal(500, hands.Frames);
+        hands.Run(events: 500, eventsPerFrame: 5);
+        Assert.Equal(100, hands.Frames);
     }
 }
