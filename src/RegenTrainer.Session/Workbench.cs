@@ -134,7 +134,7 @@ public sealed class Workbench : IDisposable
         && DesignEdit.TryMake(Design, changes, Shelf, out _, out refusal);
 
     /// <summary>The value in force as it is typed, so that <see cref="TryType"/> reads it as it is; empty where there is none.</summary>
-    public string Typed(string key) => Design.Family.FieldFor(key) is { } field && InForce(field) is { } value ? TypedValue.Write(field, value) : "";
+    public string Typed(string key) => Design.Family.FieldFor(key) is { } field ? TypedChange.Write(Design, field) : "";
 
     /// <summary>
     /// Changes one value by a step: along the field's preferred series (IEC 60063), a turn, the next word or device that can stand
@@ -150,33 +150,20 @@ public sealed class Workbench : IDisposable
             return TryChange(key, null, out refusal);
         }
 
-        switch (field.Kind)
+        string first = "";
+        IEnumerable<FieldValue> steps = FieldSteps.From(Design, field, up, Shelf, out string none);
+        foreach (FieldValue next in steps)
         {
-            case FieldKind.Pairs:
-                refusal = "a table of pairs has no steps: type it";
-                return false;
-            case FieldKind.Choice:
-                return TryWords(field, FieldSteps.Words(field.Choices, Design.WordOrNull(key), up), out refusal);
-            case FieldKind.Device:
-                return TryWords(field, FieldSteps.Words(Shelf.Names, Design.WordOrNull(key), up), out refusal);
-            default:
-                break;
+            if (TryChange(key, TypedChange.WithTolerance(Design, field, next), out refusal))
+            {
+                return true;
+            }
+
+            first = first.Length == 0 ? refusal : first;
         }
 
-        if (Design.NumberOrNull(key) is not { } number)
-        {
-            refusal = "nothing is given to step from: type a value";
-            return false;
-        }
-
-        if (FieldSteps.Number(field, number, up) is not { } next)
-        {
-            refusal = $"no step {(up ? "above" : "below")} {QuantityText.Write(number, field.Unit, 6)} within "
-                + $"{QuantityText.Write(field.Minimum, field.Unit, 6)} to {QuantityText.Write(field.Maximum, field.Unit, 6)}";
-            return false;
-        }
-
-        return TryChange(key, TypedChange.Keeping(Design, field, FieldValue.Of(next)), out refusal);
+        refusal = first.Length == 0 ? none : first;
+        return false;
     }
 
     /// <summary>The names on the shelf that can stand in a device field as the design is now.</summary>
@@ -318,27 +305,6 @@ public sealed class Workbench : IDisposable
 
         return answer;
     }
-
-    private bool TryWords(Field field, IEnumerable<string> words, out string refusal)
-    {
-        string first = "";
-        foreach (string word in words)
-        {
-            if (TryChange(field.Key, FieldValue.Of(word), out refusal))
-            {
-                return true;
-            }
-
-            first = first.Length == 0 ? refusal : first;
-        }
-
-        refusal = first.Length == 0 ? "there is no other to step to" : first;
-        return false;
-    }
-
-    private FieldValue? InForce(Field field) =>
-        Design.Values.GetValueOrDefault(field.Key)
-        ?? (field.Default is { } number ? FieldValue.Of(number) : field.DefaultText is { } word ? FieldValue.Of(word) : null);
 
     /// <summary>The unsaved work as it is now; its text is worked out by the one who asks, on whatever thread.</summary>
     private Func<RecoveryContent> Unsaved()

@@ -47,12 +47,20 @@ internal static class TypedChange
             return false;
         }
 
-        changes = [(key, Keeping(design, field, value!)), .. read];
+        changes = [(key, WithTolerance(design, field, value!)), .. read];
         return true;
     }
 
+    /// <summary>The value in force as it is typed; empty where there is none.</summary>
+    public static string Write(StageDesign design, Field field)
+    {
+        FieldValue? value = design.Values.GetValueOrDefault(field.Key)
+            ?? (field.Default is { } number ? FieldValue.Of(number) : field.DefaultText is { } word ? FieldValue.Of(word) : null);
+        return value is null ? "" : TypedValue.Write(field, value);
+    }
+
     /// <summary>A value with the tolerance its field has been given, unless it brings one of its own.</summary>
-    public static FieldValue Keeping(StageDesign design, Field field, FieldValue value) =>
+    public static FieldValue WithTolerance(StageDesign design, Field field, FieldValue value) =>
         field.Kind == FieldKind.Quantity && value.TolerancePercent is null && design.Values.TryGetValue(field.Key, out FieldValue? given)
             ? value with { TolerancePercent = given.TolerancePercent }
             : value;
