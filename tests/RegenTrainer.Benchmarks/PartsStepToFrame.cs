@@ -1,6 +1,7 @@
 using System.Diagnostics;
 using RegenTrainer.Core.Readings;
 using RegenTrainer.Core.Stages;
+using RegenTrainer.Core.Stages.Fields;
 using RegenTrainer.Drawing;
 using RegenTrainer.Files;
 using RegenTrainer.Screens;
@@ -20,9 +21,6 @@ internal static class PartsStepToFrame
     /// <summary>Steps in one direction: from 84 to 74 turns and back.</summary>
     private const int Stretch = 10;
 
-    /// <summary>Down from the first field to the turns of the coil.</summary>
-    private const int RowsToTurns = 15;
-
     /// <summary>The median and the 99th percentile in microseconds, and the bytes allocated per step.</summary>
     public static (double Median, double P99, double Bytes) Run()
     {
@@ -32,7 +30,7 @@ internal static class PartsStepToFrame
         Theme theme = Theme.Choose(_ => null);
         using var terminal = new HeadlessTerminal(new BenchScreen(new Bench(workbench), Glyphs.Of(GlyphSet.Braille), theme), theme, 120, 40);
         terminal.Type("e");
-        terminal.Press([.. Enumerable.Repeat(Key.CursorDown, RowsToTurns)]);
+        terminal.Press([.. workbench.Design.Family.Fields.TakeWhile(field => field.Key != CoilFields.Turns).Select(_ => Key.CursorDown)]);
         Step(terminal, WarmUp, null);
         double[] microseconds = new double[Steps];
         long before = GC.GetAllocatedBytesForCurrentThread();

@@ -151,8 +151,17 @@ public sealed class PartsTerminalTests
         terminal.Type("e");
         terminal.WaitFor(Keyboard);
         terminal.Keys("Tab");
-        terminal.WaitFor("outer diameter of the form");
-        terminal.Keys("Down", "Down", "Down", "Down");
+        terminal.WaitFor("   turns  ");
+        foreach (Core.Stages.Field field in Files.Presets.Read(Files.Presets.Default).Family.Fields.SkipWhile(f => !f.Key.StartsWith("coil.", StringComparison.Ordinal)))
+        {
+            if (field.Key == "coil.turns")
+            {
+                break;
+            }
+
+            terminal.Keys("Down");
+        }
+
         terminal.WaitFor("turns of the whole coil");
     }
 }

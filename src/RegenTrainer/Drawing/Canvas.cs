@@ -81,7 +81,7 @@ internal sealed class Canvas
         }
     }
 
-    /// <summary>Writes a text in lines of whole words.</summary>
+    /// <summary>Writes a text in lines of whole words; where the rows do not suffice the last ends in an ellipsis.</summary>
     /// <returns>The row after the last.</returns>
     public int PutWrapped(Region region, string text, Ink ink)
     {
@@ -90,13 +90,9 @@ internal sealed class Canvas
         foreach (string word in Printable.Text(text).Split(' '))
         {
             string longer = line.Length == 0 ? word : line + " " + word;
-            if (line.Length > 0 && WidthOf(longer) > region.Width)
+            if (line.Length > 0 && WidthOf(longer) > region.Width && row + 1 < region.Bottom)
             {
-                if (row < region.Bottom)
-                {
-                    Put(region.Left, row++, line, ink, region.Right);
-                }
-
+                Put(region.Left, row++, line, ink, region.Right);
                 longer = word;
             }
 

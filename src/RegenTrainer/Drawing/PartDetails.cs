@@ -12,12 +12,15 @@ internal static class PartDetails
     private const string NotGiven = " where not given";
     private const string Between = ", ";
 
+    /// <summary>Rows below the meaning: range and origin.</summary>
+    private const int RowsBelow = 2;
+
     /// <summary>Draws it into a region, the most important first.</summary>
     public static void Draw(Canvas canvas, Region region, Field field, StageDesign design, StageDesign saved)
     {
         string[] meaning = field.Meaning.Split("; ", 2);
         bool saysDefault = meaning.Length > 1 && meaning[1].EndsWith(NotGiven, StringComparison.Ordinal);
-        int row = canvas.PutWrapped(region, saysDefault ? meaning[0] : field.Meaning, Ink.Heading);
+        int row = canvas.PutWrapped(region with { Height = region.Height - RowsBelow }, saysDefault ? meaning[0] : field.Meaning, Ink.Heading);
         string origin = Origin(field, design, saved, saysDefault ? meaning[1][..^NotGiven.Length] : "none");
         if (field.Kind == FieldKind.Device)
         {

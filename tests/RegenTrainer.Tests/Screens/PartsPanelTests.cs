@@ -208,7 +208,7 @@ public sealed class PartsPanelTests
         Assert.Contains("\u25b8 low", work.Text, StringComparison.Ordinal);
         work.Terminal.Press(Key.Tab);
         Assert.Equal(" coil", work.Terminal.Rows[3][..30].TrimEnd());
-        Assert.Contains("\u25b8 form diameter", work.Terminal.Rows[4], StringComparison.Ordinal);
+        Assert.Contains("\u25b8 " + work.Workbench.Design.Family.Fields.First(f => f.Key.StartsWith("coil.", StringComparison.Ordinal)).Key["coil.".Length..].Replace('_', ' '), work.Terminal.Rows[4], StringComparison.Ordinal);
         work.Terminal.Press(Key.Tab.WithShift);
         Assert.Contains("\u25b8 low", work.Text, StringComparison.Ordinal);
     }
