@@ -168,17 +168,16 @@ internal static class DialPage
     /// <summary>Where on the dial which device is of no use, and why; returns the row after.</summary>
     private static int DeadSpots(Canvas canvas, Region region, DialCurves curves)
     {
-        foreach (DialCurve curve in curves.Curves)
+        var spots = curves.Curves.SelectMany(curve => curve.DeadSpots.Select(spot => (spot, curve.Grade))).GroupBy(pair => pair.spot, pair => pair.Grade);
+        foreach (IGrouping<DeadSpot, Grade> spot in spots)
         {
-            foreach (DeadSpot spot in curve.DeadSpots)
-            {
-                string range = spot.FromHz == spot.ToHz
-                    ? Figures.Dial(spot.FromHz)
-                    : $"{Figures.Fixed(spot.FromHz / 1e3, "0")} to {Figures.Dial(spot.ToHz)}";
-                string who = curves.Curves.Count > 1 ? curve.Grade.ToString().ToLowerInvariant() + " " : "";
-                int next = canvas.PutWrapped(region, $"{who}{range}: {Words(spot.Reason)}", Ink.Caution);
-                region = region with { Top = next, Height = region.Bottom - next };
-            }
+            Grade[] grades = [.. spot];
+            string who = grades.Length == curves.Curves.Count ? "" : string.Join(", ", grades).ToLowerInvariant() + " ";
+            string range = spot.Key.FromHz == spot.Key.ToHz
+                ? Figures.Dial(spot.Key.FromHz)
+                : $"{Figures.Fixed(spot.Key.FromHz / 1e3, "0")} to {Figures.Dial(spot.Key.ToHz)}";
+            int next = canvas.PutWrapped(region, $"{who}{range}: {Words(spot.Key.Reason)}", Ink.Caution);
+            region = region with { Top = next, Height = region.Bottom - next };
         }
 
         return region.Top;
