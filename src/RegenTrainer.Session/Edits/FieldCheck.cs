@@ -6,12 +6,15 @@ namespace RegenTrainer.Session.Edits;
 /// <summary>Whether a value can stand in a field at all, whatever the other fields say.</summary>
 internal static class FieldCheck
 {
-    /// <summary>Why a value cannot stand in a field; null where it can. A null value means the field is not given.</summary>
+    /// <summary>
+    /// Why a value cannot stand in a field; null where it can. A null value means the field is not given; whether one must be that
+    /// only some choices ask for is no question of the field alone.
+    /// </summary>
     public static string? Refusal(Field field, FieldValue? value)
     {
         if (value is null)
         {
-            return field.Required ? $"found nothing, expected {field.Meaning}" : null;
+            return field is { Required: true, RequiredWith: null, OnlyWith: null } ? $"found nothing, expected {field.Meaning}" : null;
         }
 
         if (value.TolerancePercent is { } percent && (field.Kind != FieldKind.Quantity || percent is not (>= 0 and <= 100)))

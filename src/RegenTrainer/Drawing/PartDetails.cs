@@ -80,6 +80,11 @@ internal static class PartDetails
             return "given" + unsaved;
         }
 
+        if (field.OnlyWith is { } condition && !condition.Holds(design.WordOrNull))
+        {
+            return "only with " + condition.Phrase + unsaved;
+        }
+
         bool hasDefault = field.Default is not null || field.DefaultText is not null;
         return (hasDefault ? "default" : "not given: " + otherwise) + unsaved;
     }

@@ -8,30 +8,14 @@ internal static class PartValue
 {
     private const int Figures = 6;
 
-    /// <summary>So many figures are given to be typed over that nothing is lost by taking them as they are.</summary>
-    private const int TypedFigures = 15;
-
-    /// <summary>The value in force; a dash where there is none.</summary>
+    /// <summary>The value in force; a dash where there is none, or where it has no meaning with the choices made.</summary>
     public static string Shown(Field field, StageDesign design) => field.Kind switch
     {
+        _ when field.OnlyWith?.Holds(design.WordOrNull) == false => Drawing.Figures.None,
         FieldKind.Choice or FieldKind.Device => design.WordOrNull(field.Key) ?? Drawing.Figures.None,
         FieldKind.Pairs => design.Values.TryGetValue(field.Key, out FieldValue? table) ? $"{table.Pairs.Count} pairs" : Drawing.Figures.None,
         _ => design.NumberOrNull(field.Key) is { } number ? Number(field, number) : Drawing.Figures.None,
     };
-
-    /// <summary>The value in force as it would be typed; empty where there is none.</summary>
-    public static string Typed(Field field, StageDesign design)
-    {
-        if (design.NumberOrNull(field.Key) is not { } number)
-        {
-            return "";
-        }
-
-        string text = field.Unit == Unit.Volt ? QuantityText.Write(number, field.Unit, TypedFigures) : QuantityText.WriteCode(number, field.Unit, TypedFigures);
-        return design.Values.TryGetValue(field.Key, out FieldValue? given) && given.TolerancePercent is { } percent
-            ? $"{text} {QuantityText.WriteCode(percent, Unit.Percent, Figures)}"
-            : text;
-    }
 
     /// <summary>A number of a field: resistors in letter code, everything else with its unit.</summary>
     public static string Number(Field field, double number) =>
