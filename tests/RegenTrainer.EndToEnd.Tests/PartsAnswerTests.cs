@@ -8,7 +8,7 @@ public sealed class PartsAnswerTests
     private const double Tolerance = 1e-9;
 
     public static TheoryData<string, string> Settings => new MatrixTheoryData<string, string>(
-        ["tapped-coil-npn", "tapped-coil-pnp", "tapped-coil-follower-off", "plain-tank"],
+        ["tapped-coil-npn", "tapped-coil-pnp", "tapped-coil-follower-off", "plain-tank", "crystal-set"],
         ["--dial 550k --travel 20", "--dial 1M --travel 50 --station 1004k --grade weak", "--dial 1.6M --travel 35 --supply 2.6 --temperature 5"]);
 
     [Theory]

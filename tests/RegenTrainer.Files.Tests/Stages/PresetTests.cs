@@ -13,7 +13,7 @@ public sealed class PresetTests
     [Fact]
     public void Four_presets_ship()
     {
-        Assert.Equal(["plain-tank", "tapped-coil-follower-off", "tapped-coil-npn", "tapped-coil-pnp"], Presets.Names);
+        Assert.Equal(["crystal-set", "plain-tank", "tapped-coil-follower-off", "tapped-coil-npn", "tapped-coil-pnp"], Presets.Names);
         Assert.Contains(Presets.Default, Presets.Names);
     }
 

@@ -1,4 +1,5 @@
 using RegenTrainer.Core.Circuits;
+using RegenTrainer.Core.Devices;
 using RegenTrainer.Core.Stages.Expansion;
 
 namespace RegenTrainer.Core.Stages.Fields;
@@ -36,8 +37,9 @@ public static class BiasFields
     /// <summary>The sockets.</summary>
     public static IReadOnlyList<Field> Devices { get; } =
     [
-        FieldOf.Device(MainDevice, "regenerating device") with { Required = true },
-        FieldOf.Device(FollowerDevice, "device of the output follower"),
+        FieldOf.Device(MainDevice, "regenerating device", DeviceKind.Bipolar) with { Required = true },
+        FieldOf.Device(FollowerDevice, "device of the output follower", DeviceKind.Bipolar),
+        DetectorFields.Socket,
     ];
 
     /// <summary>The feed, in the order of the documentation.</summary>
@@ -70,7 +72,7 @@ public static class BiasFields
         parts.Add(new Resistor("base resistor", collector, feed, design.Number(BaseResistor)));
         string @base = parts.ThroughResistor("base stopper", feed, design.Number(BaseStopper), "base");
         parts.AddCapacitor("base wiring", @base, Part.Earth, design.Number(LayoutFields.BaseLead));
-        parts.Add(new Bipolar("main", @base, collector, emitter, design.Devices[MainDevice]) { Role = PartRole.Regenerating });
+        parts.Add(new Bipolar("main", @base, collector, emitter, design.Device<BipolarModel>(MainDevice)) { Role = PartRole.Regenerating });
         parts.Add(new Resistor("collector resistor", rail, collector, design.Number(CollectorResistor)));
     }
 
