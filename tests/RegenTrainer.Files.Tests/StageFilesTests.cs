@@ -54,7 +54,7 @@ public sealed class StageFilesTests : IDisposable
     {
         string message = StageFiles.Open("no\u001b[31msuch").Message!;
         Assert.DoesNotContain('\u001b', message);
-        Assert.Contains("there is no such file; presets are plain-tank", message, StringComparison.Ordinal);
+        Assert.Contains("there is no such file; presets are crystal-set, plain-tank", message, StringComparison.Ordinal);
         Assert.Contains("it is a folder", StageFiles.Open(_folder).Message!, StringComparison.Ordinal);
     }
 

@@ -35,7 +35,10 @@ public static class BiasReader
         DeviceBias[] devices = [.. Enumerable.Range(0, model.Network.Devices.Count)
             .Where(d => model.Network.Devices[d].Model is BipolarModel).Select(d => Device(w, d, setting, cautions))];
         (string, double)[] nodes = [.. model.Network.NodeNames.Select(n => (n, w.Voltages[model.Network.NodeIndex(n)]))];
-        return new BiasReading(inForce, cautions, devices, nodes, SupplyAmpere(w), bias.ResidualAmpere);
+        return new BiasReading(inForce, cautions, devices, nodes, SupplyAmpere(w), bias.ResidualAmpere)
+        {
+            Diodes = DiodeBias.ReadAll(w, cautions),
+        };
     }
 
     private static DeviceBias Device(Workspace w, int d, Setting setting, List<Caution> cautions)

@@ -52,7 +52,7 @@ public sealed record DeviceBias(
 /// <summary>The operating point in the builder's terms.</summary>
 /// <param name="Setting">The setting in force.</param>
 /// <param name="Cautions">Warnings.</param>
-/// <param name="Devices">Each device.</param>
+/// <param name="Devices">Each transistor.</param>
 /// <param name="NodeVolts">Voltage of every named node to earth.</param>
 /// <param name="SupplyAmpere">Current out of the supply in ampere; null where there is none.</param>
 /// <param name="ResidualAmpere">Largest current left over at a node, in ampere.</param>
@@ -62,4 +62,8 @@ public sealed record BiasReading(
     IReadOnlyList<DeviceBias> Devices,
     IReadOnlyList<(string Node, double Volt)> NodeVolts,
     double? SupplyAmpere,
-    double ResidualAmpere);
+    double ResidualAmpere)
+{
+    /// <summary>Each diode.</summary>
+    public IReadOnlyList<DiodeBias> Diodes { get; init; } = [];
+}

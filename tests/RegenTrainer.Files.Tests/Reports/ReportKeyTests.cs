@@ -61,11 +61,12 @@ public sealed class ReportKeyTests
         Assert.Equal("frequency_hz gain_db phase_degrees", Keys(sidebands.GetProperty("response")[0]));
 
         JsonElement bias = Parse(BiasJson.Write("S", SampleAnswers.Bias));
-        Assert.Equal(Head + "devices nodes supply_ampere residual_ampere", Keys(bias));
+        Assert.Equal(Head + "devices diodes nodes supply_ampere residual_ampere", Keys(bias));
         Assert.Equal(
             "name type collector_ampere base_ampere base_emitter_volt collector_emitter_volt transconductance_siemens "
             + "current_gain dissipation_watt saturated",
             Keys(bias.GetProperty("devices")[0]));
+        Assert.Equal("name type forward_ampere forward_volt junction_ohm junction_farad", Keys(bias.GetProperty("diodes")[0]));
         Assert.Equal("node volt", Keys(bias.GetProperty("nodes")[0]));
 
         JsonElement coil = Parse(CoilJson.Write(null, SampleAnswers.Coil));

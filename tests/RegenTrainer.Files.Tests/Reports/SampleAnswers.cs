@@ -68,7 +68,10 @@ internal static class SampleAnswers
         [new DeviceBias("main", "BC547B", 1.4e-3, 5e-6, 0.64, 1.9, 0.054, 280, 2.7e-3, false)],
         [("collector", 1.9)],
         1.6e-3,
-        1e-17);
+        1e-17)
+    {
+        Diodes = [new DiodeBias("detector", "1N34A", 1e-6, 0.02, 2.6e4, 1e-12)],
+    };
 
     public static readonly CoilReading Coil = new(
         1e6,

@@ -11,7 +11,7 @@ public sealed class PresetTests
     public static TheoryData<string> Names => [.. Presets.Names];
 
     [Fact]
-    public void Four_presets_ship()
+    public void The_presets_ship()
     {
         Assert.Equal(["crystal-set", "plain-tank", "tapped-coil-follower-off", "tapped-coil-npn", "tapped-coil-pnp"], Presets.Names);
         Assert.Contains(Presets.Default, Presets.Names);

@@ -91,11 +91,12 @@ public static class OutputFields
             return;
         }
 
-        if (design.DeviceOrNull<BipolarModel>(BiasFields.FollowerDevice) is not { } follower)
+        if (!design.Devices.ContainsKey(BiasFields.FollowerDevice))
         {
             faults.Missing(BiasFields.FollowerDevice, $"a device for the follower, or \"{Load}\" as {Kind}");
         }
-        else if (design.DeviceOrNull<BipolarModel>(BiasFields.MainDevice) is { } main && follower.Polarity != main.Polarity)
+        else if (design.DeviceOrNull<BipolarModel>(BiasFields.FollowerDevice) is { } follower
+            && design.DeviceOrNull<BipolarModel>(BiasFields.MainDevice) is { } main && follower.Polarity != main.Polarity)
         {
             faults.Add(
                 BiasFields.FollowerDevice,
