@@ -1,4 +1,4 @@
-using RegenTrainer.Core.Circuits;
+using RegenTrainer.Core.Devices;
 using RegenTrainer.Core.Readings;
 using RegenTrainer.Core.Selectivity;
 using RegenTrainer.Core.Stages;
@@ -49,10 +49,10 @@ public sealed class StageSolver(StageModel model, IReadOnlyList<double> audioHz)
     /// <inheritdoc/>
     public Setting Fit(Setting setting)
     {
-        Bipolar? socket = model.Network.Devices.FirstOrDefault(d => d.Regenerating)?.Part;
+        BipolarModel? socket = model.Network.Devices.FirstOrDefault(d => d.Regenerating)?.Model as BipolarModel;
         return setting with
         {
-            Device = setting.Device is { } device && device.Polarity == socket?.Model.Polarity ? device : null,
+            Device = setting.Device is { } device && device.Polarity == socket?.Polarity ? device : null,
             SupplyVolt = SupplyVolt is null ? null : setting.SupplyVolt,
         };
     }

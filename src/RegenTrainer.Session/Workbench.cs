@@ -180,7 +180,7 @@ public sealed class Workbench : IDisposable
     }
 
     /// <summary>A type by its name on the shelf; null where there is none or its file has faults.</summary>
-    public BipolarModel? Device(string name) => Shelf.Find(name)?.Model;
+    public DeviceModel? Device(string name) => Shelf.Find(name)?.Model;
 
     /// <summary>Takes the last step of the design back; knob, dial and supply stay.</summary>
     /// <returns>Whether there was one.</returns>

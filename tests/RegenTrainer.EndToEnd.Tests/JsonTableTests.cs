@@ -24,7 +24,7 @@ public sealed partial class JsonTableTests
             ("reading", [["reading", "tapped-coil-npn", "--travel", "55", "--json"], ["reading", "plain-tank", "--travel", "100", "--json"]]),
             ("dial", [["dial", "tapped-coil-npn", "--supply", "0.6", "--json"], ["dial", "tapped-coil-npn", "--json"]]),
             ("sidebands", [["sidebands", "tapped-coil-npn", "--json"]]),
-            ("bias", [["bias", "tapped-coil-npn", "--json"]]),
+            ("bias", [["bias", "tapped-coil-npn", "--json"], ["bias", "crystal-set", "--json"]]),
             ("coil", [["coil", "tapped-coil-npn", "--json"]]),
             ("check", [["check", faulty.Path, "--json"]]),
             ("presets", [["presets", "--json"]]),

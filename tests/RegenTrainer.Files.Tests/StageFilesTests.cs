@@ -1,4 +1,5 @@
 using System.Text;
+using RegenTrainer.Core.Devices;
 using RegenTrainer.Files.Devices;
 
 namespace RegenTrainer.Files.Tests;
@@ -62,8 +63,8 @@ public sealed class StageFilesTests : IDisposable
     {
         Put("Bc547B.toml", Encoding.UTF8.GetBytes(Device("BC547B").Replace("typical = 290", "typical = 300", StringComparison.Ordinal)));
         OpenedFile file = StageFiles.Open(Put("stage.toml", Encoding.UTF8.GetBytes(Presets.Text(Presets.Default))));
-        Assert.Equal(300, file.Design!.Devices["devices.main"].CurrentGain.Typical);
-        Assert.Equal(290, DeviceShelf.Shipped.Find("BC547B")!.Model!.CurrentGain.Typical);
+        Assert.Equal(300, file.Design!.Device<BipolarModel>("devices.main").CurrentGain.Typical);
+        Assert.Equal(290, ((BipolarModel)DeviceShelf.Shipped.Find("BC547B")!.Model!).CurrentGain.Typical);
     }
 
     [Fact]

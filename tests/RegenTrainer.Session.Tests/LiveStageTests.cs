@@ -226,7 +226,7 @@ public sealed class LiveStageTests
         var npn = new StageSolver(StageModel.Compile(Presets.Read("tapped-coil-npn")), [1000]);
         var pnp = new StageSolver(StageModel.Compile(Presets.Read("tapped-coil-pnp")), [1000]);
         var plain = new StageSolver(StageModel.Compile(Presets.Read("plain-tank")), [1000]);
-        BipolarModel device = DeviceShelf.Shipped.Find("2N4401")!.Model!;
+        var device = (BipolarModel)DeviceShelf.Shipped.Find("2N4401")!.Model!;
         var live = new LiveStage(npn, _start with { Device = device, SupplyVolt = 2.4 });
         Assert.Equal("2N4401", live.Reading.Setting.Device);
         live.Replace(pnp);

@@ -1,4 +1,5 @@
 using RegenTrainer.Core.Coils;
+using RegenTrainer.Core.Devices;
 
 namespace RegenTrainer.Core.Circuits;
 
@@ -7,7 +8,7 @@ namespace RegenTrainer.Core.Circuits;
 /// each part stamps [Ho, Ruehli and Brennan 1975, modified nodal equations].
 /// </summary>
 /// <remarks>
-/// Unknowns are the node voltages, an inner base node for every bipolar transistor, and a scaled current for every winding
+/// Unknowns are the node voltages, an inner node behind the base or anode lead of every device, and a scaled current for every winding
 /// section, inductor and ideal source (ampere times <see cref="CurrentScaleOhm"/>, so that all unknowns are of one size).
 /// </remarks>
 public sealed class Network
@@ -58,7 +59,7 @@ public sealed class Network
     /// <summary>The names of the circuit's own nodes, in order of their unknowns.</summary>
     public IReadOnlyList<string> NodeNames { get; }
 
-    /// <summary>The bipolar transistors, in the order of the parts.</summary>
+    /// <summary>The devices, in the order of the parts.</summary>
     public IReadOnlyList<DeviceStamp> Devices { get; }
 
     /// <summary>Where the tuning capacitor stands; null where there is none.</summary>
@@ -201,16 +202,20 @@ internal readonly record struct WindingStamp(IWindingModel Model, int[] Entries,
 /// <param name="Regenerating">Whether it is taken out for "regeneration off".</param>
 internal readonly record struct FeedbackStamp(int[] Entries, int[] Terminals, double Siemens, double Factor, bool Controlled, bool Regenerating);
 
-/// <summary>A three-terminal device as a two-port of control, output and common.</summary>
+/// <summary>
+/// A device as a two-port of control, output and common. A diode has no output terminal: its output stands at earth, where its
+/// law neither takes nor gives anything.
+/// </summary>
 /// <param name="Part">The part.</param>
+/// <param name="Model">The type in the part's socket.</param>
 /// <param name="Control">Unknown of the inner control terminal.</param>
-/// <param name="Output">Unknown of the output terminal, -1 for earth.</param>
+/// <param name="Output">Unknown of the output terminal, -1 for earth and for none.</param>
 /// <param name="Common">Unknown of the common terminal, -1 for earth.</param>
 /// <param name="LeadResistance">Entries of the resistance between control lead and inner control terminal.</param>
-/// <param name="Entries">The nine entries, rows and columns in the order control, output, common; -1 where earth.</param>
+/// <param name="Entries">The nine entries, rows and columns in the order control, output, common; -1 where earth or none.</param>
 /// <param name="Regenerating">Whether it is taken out for "regeneration off".</param>
 public sealed record DeviceStamp(
-    Bipolar Part, int Control, int Output, int Common, PairStamp LeadResistance, int[] Entries, bool Regenerating);
+    Part Part, DeviceModel Model, int Control, int Output, int Common, PairStamp LeadResistance, int[] Entries, bool Regenerating);
 
 /// <summary>The element the regeneration control turns.</summary>
 /// <param name="Pair">Entries of a controlled resistor; null for a feedback factor.</param>

@@ -1,3 +1,5 @@
+using RegenTrainer.Core.Devices;
+
 namespace RegenTrainer.Core.Circuits;
 
 /// <summary>Numbers the unknowns of a circuit and gives every part its entries.</summary>
@@ -198,7 +200,10 @@ internal sealed class NetworkBuilder
                 AddFeedback(f);
                 break;
             case Bipolar q:
-                AddDevice(q);
+                AddDevice(q, q.Model, "base", q.Base, q.Collector, q.Emitter);
+                break;
+            case Diode d:
+                AddDevice(d, d.Model, "anode", d.Anode, null, d.Cathode);
                 break;
             default:
                 throw new InvalidOperationException($"no stamp for a {part.GetType().Name}");
@@ -311,11 +316,11 @@ internal sealed class NetworkBuilder
             entries, terminals, part.Siemens, part.Factor, controlled, controlled || part.Role == PartRole.Regenerating));
     }
 
-    private void AddDevice(Bipolar part)
+    private void AddDevice(Part part, DeviceModel model, string lead, string control, string? output, string common)
     {
         int inner = UnknownNames.Count;
-        UnknownNames.Add("inner base of " + part.Name);
-        int[] terminals = [inner, Index(part.Collector), Index(part.Emitter)];
+        UnknownNames.Add($"inner {lead} of {part.Name}");
+        int[] terminals = [inner, output is null ? -1 : Index(output), Index(common)];
         int[] entries = new int[9];
         for (int i = 0; i < 3; i++)
         {
@@ -328,10 +333,14 @@ internal sealed class NetworkBuilder
 
         bool regenerating = part.Role == PartRole.Regenerating;
         JoinKind kind = regenerating ? JoinKind.RegeneratingDirect : JoinKind.Direct;
-        _joins.Add((Index(part.Base), inner, JoinKind.Direct));
-        _joins.Add((inner, terminals[1], kind));
+        _joins.Add((Index(control), inner, JoinKind.Direct));
         _joins.Add((inner, terminals[2], kind));
+        if (output is not null)
+        {
+            _joins.Add((inner, terminals[1], kind));
+        }
+
         Devices.Add(new DeviceStamp(
-            part, inner, terminals[1], terminals[2], Pair(Index(part.Base), inner, capacitive: false), entries, regenerating));
+            part, model, inner, terminals[1], terminals[2], Pair(Index(control), inner, capacitive: false), entries, regenerating));
     }
 }

@@ -260,14 +260,14 @@ public sealed class NetworkValues
         for (int d = 0; d < _laws.Length; d++)
         {
             DeviceStamp stamp = _network.Devices[d];
-            BipolarModel model = stamp.Regenerating && conditions.ReplacementDevice is { } replacement ? replacement : stamp.Part.Model;
+            DeviceModel model = stamp.Regenerating && conditions.ReplacementDevice is { } replacement ? replacement : stamp.Model;
             Grade grade = stamp.Regenerating ? conditions.Grade : Grade.Typical;
             if (!sameLaws || _laws[d] is null)
             {
                 _laws[d] = model.LawAt(grade, conditions.TemperatureCelsius);
             }
 
-            double leadSiemens = 1 / Math.Max(model.BaseOhm(grade), SmallestLeadOhm);
+            double leadSiemens = 1 / Math.Max(model.LeadOhm(grade), SmallestLeadOhm);
             stamp.LeadResistance.Add(_baseG, leadSiemens);
             stamp.LeadResistance.Add(_baseDirect, leadSiemens);
         }

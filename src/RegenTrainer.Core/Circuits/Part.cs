@@ -126,6 +126,17 @@ public sealed record Bipolar(string Name, string Base, string Collector, string 
     public override IReadOnlyList<string> Nodes => [Base, Collector, Emitter];
 }
 
+/// <summary>A diode of a type from the shelf.</summary>
+/// <param name="Name">The builder's name of the part.</param>
+/// <param name="Anode">Node of the anode lead.</param>
+/// <param name="Cathode">Node of the cathode lead.</param>
+/// <param name="Model">The type's figures.</param>
+public sealed record Diode(string Name, string Anode, string Cathode, DiodeModel Model) : Part(Name)
+{
+    /// <inheritdoc/>
+    public override IReadOnlyList<string> Nodes => [Anode, Cathode];
+}
+
 /// <summary>Coupled windings: the sections of <paramref name="Model"/> in order, each between two nodes.</summary>
 /// <param name="Name">The builder's name of the part.</param>
 /// <param name="SectionNodes">Start and end node of every section, as many as the model has sections.</param>

@@ -96,9 +96,9 @@ internal sealed class PortResponses
         if (k == 1)
         {
             Array.Clear(w.Right);
-            foreach (BranchStamp branch in w.Network.Branches.Where(b => b.Kind == BranchKind.Antenna))
+            foreach (BranchStamp branch in w.Network.Branches.Where(b => b.Emf != 0))
             {
-                w.Right[branch.Unknown] = 1 / Network.CurrentScaleOhm;
+                w.Right[branch.Unknown] = branch.Emf / Network.CurrentScaleOhm;
             }
 
             w.PencilLu.Solve(w.Right);

@@ -24,9 +24,6 @@ public sealed class BipolarLaw : IDeviceLaw
     /// <summary>The gain rises as this power of temperature, 0.6 %/K near 25 °C: from memory.</summary>
     private const double GainPower = 1.75;
 
-    /// <summary>Above this exponent the exponentials go on as straight lines, so that nothing overflows.</summary>
-    private const double LargestExponent = 60;
-
     /// <summary>The transport factor 1 - v_bc/V_A is held above this where a large forward collector junction would turn it over.</summary>
     private const double SmallestEarlyFactor = 0.05;
 
@@ -75,7 +72,7 @@ public sealed class BipolarLaw : IDeviceLaw
         double transit = (1 / (2 * Math.PI * transition)) - (junctions * coldThermal / transitionAt);
         IsTransitTimeClamped = transit < 0;
         _transitSeconds = Math.Max(0, transit) * early;
-        _criticalVolt = _thermalVolt * Math.Log(_thermalVolt / (Math.Sqrt(2) * _saturation));
+        _criticalVolt = JunctionCurve.CriticalVolt(_thermalVolt, _saturation);
     }
 
     /// <summary>Whether the stated capacitances alone are slower than the stated transition frequency, so that no transit time is left.</summary>
@@ -110,11 +107,11 @@ public sealed class BipolarLaw : IDeviceLaw
 
     private ConductionPoint Conduct(double baseEmitter, double baseCollector, out double forwardAmpere, out double forwardSiemens)
     {
-        double half = Exponential(0.5 * baseEmitter / _thermalVolt, out double halfSlope);
-        (double forward, double forwardSlope) = 0.5 * baseEmitter / _thermalVolt < LargestExponent / 2
+        double half = JunctionCurve.Exponential(0.5 * baseEmitter / _thermalVolt, out double halfSlope);
+        (double forward, double forwardSlope) = 0.5 * baseEmitter / _thermalVolt < JunctionCurve.LargestExponent / 2
             ? (half * half, half * half)
-            : (Exponential(baseEmitter / _thermalVolt, out double s), s);
-        double reverse = Exponential(baseCollector / _thermalVolt, out double reverseSlope);
+            : (JunctionCurve.Exponential(baseEmitter / _thermalVolt, out double s), s);
+        double reverse = JunctionCurve.Exponential(baseCollector / _thermalVolt, out double reverseSlope);
 
         forwardAmpere = _saturation * (forward - 1);
         double reverseAmpere = _saturation * (reverse - 1);
@@ -143,7 +140,8 @@ public sealed class BipolarLaw : IDeviceLaw
     /// <inheritdoc/>
     public bool LimitStep(double v1Old, double v2Old, ref double v1New, ref double v2New)
     {
-        double emitter = Limit(_sign * v1Old, _sign * v1New), collector = Limit(_sign * (v1Old - v2Old), _sign * (v1New - v2New));
+        double emitter = JunctionCurve.Limit(_sign * v1Old, _sign * v1New, _thermalVolt, _criticalVolt);
+        double collector = JunctionCurve.Limit(_sign * (v1Old - v2Old), _sign * (v1New - v2New), _thermalVolt, _criticalVolt);
         if (emitter == _sign * v1New && collector == _sign * (v1New - v2New))
         {
             return false;
@@ -191,36 +189,5 @@ public sealed class BipolarLaw : IDeviceLaw
             double volt = SheetPoint(ampere, saturation).BaseVolt, thermal = PhysicalConstants.ThermalVoltage(DataSheetCelsius);
             return (saturation * (Math.Exp(volt / thermal) - 1), Math.Exp(0.5 * volt / thermal) - 1, ampere / ratio);
         }
-    }
-
-    private static double Exponential(double x, out double slope)
-    {
-        if (x < LargestExponent)
-        {
-            return slope = Math.Exp(x);
-        }
-
-        slope = Math.Exp(LargestExponent);
-        return slope * (1 + x - LargestExponent);
-    }
-
-    /// <summary>
-    /// Above the voltage where the exponential bends most sharply against a straight line, a step takes the new current as
-    /// the linearised one rather than the exponential of the new voltage (logarithmic damping of junction steps).
-    /// </summary>
-    private double Limit(double before, double after)
-    {
-        if (after <= _criticalVolt || Math.Abs(after - before) <= 2 * _thermalVolt)
-        {
-            return after;
-        }
-
-        if (before <= 0)
-        {
-            return _criticalVolt;
-        }
-
-        double argument = 1 + ((after - before) / _thermalVolt);
-        return argument > 0 ? before + (_thermalVolt * Math.Log(argument)) : _criticalVolt;
     }
 }

@@ -19,7 +19,7 @@ public sealed record BipolarModel(
     DeviceFigure InputCapacitance,
     DeviceFigure SaturationCurrent,
     DeviceFigure EarlyVoltage,
-    DeviceFigure BaseResistance)
+    DeviceFigure BaseResistance) : DeviceModel(Name)
 {
     /// <summary>Gain at a second, lower current; null where the data sheet has none and the gain is taken as constant below.</summary>
     public DeviceFigure? CurrentGainLow { get; init; }
@@ -27,11 +27,15 @@ public sealed record BipolarModel(
     /// <summary>Limits; null where none are stated.</summary>
     public DeviceRating? Rating { get; init; }
 
-    /// <summary>The law of a device of this type.</summary>
-    /// <param name="grade">Which device.</param>
-    /// <param name="temperatureCelsius">Junction temperature in °C, -100 to 200.</param>
-    public BipolarLaw LawAt(Grade grade, double temperatureCelsius) => new(this, grade, temperatureCelsius);
+    /// <inheritdoc/>
+    public override DeviceKind Kind => DeviceKind.Bipolar;
+
+    /// <inheritdoc/>
+    public override BipolarLaw LawAt(Grade grade, double temperatureCelsius) => new(this, grade, temperatureCelsius);
 
     /// <summary>The resistance between base lead and inner base, in ohm.</summary>
     public double BaseOhm(Grade grade) => BaseResistance.FallingWith(grade);
+
+    /// <inheritdoc/>
+    public override double LeadOhm(Grade grade) => BaseOhm(grade);
 }

@@ -5,13 +5,13 @@ namespace RegenTrainer.Core.Devices;
 /// <summary>Which device of its type: the spread of a drawer.</summary>
 public enum Grade
 {
-    /// <summary>Regenerates least: low gain, much capacitance, slow.</summary>
+    /// <summary>Regenerates least: low gain, much capacitance, slow; of a diode the one that loads the tank most.</summary>
     Weak,
 
     /// <summary>The data sheet's typical device.</summary>
     Typical,
 
-    /// <summary>Regenerates most: high gain, little capacitance, fast.</summary>
+    /// <summary>Regenerates most: high gain, little capacitance, fast; of a diode the one that loads the tank least.</summary>
     Strong,
 }
 

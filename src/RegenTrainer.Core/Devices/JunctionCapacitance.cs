@@ -12,38 +12,42 @@ internal readonly struct JunctionCapacitance
     /// <summary>Grading exponent: a graded junction, from memory.</summary>
     public const double Grading = 0.33;
 
-    private const double BendVolt = BuiltInVolt / 2;
-
     private readonly double _zeroBias;
+    private readonly double _builtInVolt;
+    private readonly double _grading;
     private readonly double _bendFarad;
     private readonly double _bendSlope;
     private readonly double _bendCharge;
 
-    /// <summary>A junction by its capacitance without bias, in farad.</summary>
-    public JunctionCapacitance(double zeroBiasFarad)
+    /// <summary>A junction by its capacitance without bias.</summary>
+    /// <param name="zeroBiasFarad">Capacitance without bias in farad.</param>
+    /// <param name="builtInVolt">Built-in voltage in volt, above 0.</param>
+    /// <param name="grading">Grading exponent, above 0 and below 1.</param>
+    public JunctionCapacitance(double zeroBiasFarad, double builtInVolt = BuiltInVolt, double grading = Grading)
     {
-        _zeroBias = zeroBiasFarad;
-        _bendFarad = zeroBiasFarad * Math.Pow(0.5, -Grading);
-        _bendSlope = _bendFarad * Grading / (BuiltInVolt * 0.5);
-        _bendCharge = zeroBiasFarad * BuiltInVolt / (1 - Grading) * (1 - Math.Pow(0.5, 1 - Grading));
+        (_zeroBias, _builtInVolt, _grading) = (zeroBiasFarad, builtInVolt, grading);
+        _bendFarad = zeroBiasFarad * Math.Pow(0.5, -grading);
+        _bendSlope = _bendFarad * grading / (builtInVolt * 0.5);
+        _bendCharge = zeroBiasFarad * builtInVolt / (1 - grading) * (1 - Math.Pow(0.5, 1 - grading));
     }
 
     /// <summary>The junction whose capacitance at a reverse voltage is given.</summary>
-    public static JunctionCapacitance FromReverse(double farad, double reverseVolt) =>
-        new(farad * Math.Pow(1 + (reverseVolt / BuiltInVolt), Grading));
+    public static JunctionCapacitance FromReverse(
+        double farad, double reverseVolt, double builtInVolt = BuiltInVolt, double grading = Grading) =>
+        new(farad * Math.Pow(1 + (reverseVolt / builtInVolt), grading), builtInVolt, grading);
 
     /// <summary>Charge in coulomb (zero without bias) and capacitance in farad at a forward voltage.</summary>
     public (double Charge, double Farad) At(double volt)
     {
-        if (volt > BendVolt)
+        double above = volt - (_builtInVolt / 2);
+        if (above > 0)
         {
-            double above = volt - BendVolt;
             return (_bendCharge + (above * (_bendFarad + (0.5 * above * _bendSlope))), _bendFarad + (above * _bendSlope));
         }
 
         // One power serves both: (1-v/phi)^(1-m) = (1-v/phi) (1-v/phi)^-m.
-        double rest = 1 - (volt / BuiltInVolt);
-        double power = Math.Exp(-Grading * Math.Log(rest));
-        return (_zeroBias * BuiltInVolt / (1 - Grading) * (1 - (rest * power)), _zeroBias * power);
+        double rest = 1 - (volt / _builtInVolt);
+        double power = Math.Exp(-_grading * Math.Log(rest));
+        return (_zeroBias * _builtInVolt / (1 - _grading) * (1 - (rest * power)), _zeroBias * power);
     }
 }

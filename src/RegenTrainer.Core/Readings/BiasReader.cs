@@ -26,7 +26,8 @@ public static class BiasReader
             return new BiasReading(inForce, cautions, [], [], null, double.NaN);
         }
 
-        DeviceBias[] devices = [.. Enumerable.Range(0, model.Network.Devices.Count).Select(d => Device(w, d, setting, cautions))];
+        DeviceBias[] devices = [.. Enumerable.Range(0, model.Network.Devices.Count)
+            .Where(d => model.Network.Devices[d].Model is BipolarModel).Select(d => Device(w, d, setting, cautions))];
         (string, double)[] nodes = [.. model.Network.NodeNames.Select(n => (n, w.Voltages[model.Network.NodeIndex(n)]))];
         double? supply = BatteryReader.Ampere(w);
         (BiasDrift? perKelvin, BiasDrift? perTenthVolt) = DriftReader.Read(ws, setting);
@@ -35,13 +36,14 @@ public static class BiasReader
             Battery = BatteryReader.TryRead(ws, setting),
             PerKelvin = perKelvin,
             PerTenthVolt = perTenthVolt,
+            Diodes = DiodeBias.ReadAll(w, cautions),
         };
     }
 
     private static DeviceBias Device(Workspace w, int d, Setting setting, List<Caution> cautions)
     {
         DeviceStamp stamp = w.Network.Devices[d];
-        BipolarModel model = stamp.Regenerating && setting.Device is { } replacement ? replacement : stamp.Part.Model;
+        BipolarModel model = stamp.Regenerating && setting.Device is { } replacement ? replacement : (BipolarModel)stamp.Model;
         TwoPortPoint p = w.Points[d];
         double sign = model.Polarity == Polarity.Npn ? 1 : -1;
         double At(int unknown) => unknown < 0 ? 0 : w.Voltages[unknown];

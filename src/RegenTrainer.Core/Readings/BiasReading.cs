@@ -28,7 +28,7 @@ public sealed record DeviceBias(
 /// <summary>The operating point in the builder's terms.</summary>
 /// <param name="Setting">The setting in force.</param>
 /// <param name="Cautions">Warnings.</param>
-/// <param name="Devices">Each device.</param>
+/// <param name="Devices">Each transistor.</param>
 /// <param name="NodeVolts">Voltage of every named node to earth.</param>
 /// <param name="SupplyAmpere">Current out of the supply in ampere; null where there is none.</param>
 /// <param name="ResidualAmpere">Largest current left over at a node, in ampere.</param>
@@ -40,6 +40,9 @@ public sealed record BiasReading(
     double? SupplyAmpere,
     double ResidualAmpere)
 {
+    /// <summary>Each diode.</summary>
+    public IReadOnlyList<DiodeBias> Diodes { get; init; } = [];
+
     /// <summary>What the supply gives from fresh to tired; null where the stage has none.</summary>
     public BatteryLife? Battery { get; init; }
 

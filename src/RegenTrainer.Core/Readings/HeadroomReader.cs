@@ -1,4 +1,5 @@
 using RegenTrainer.Core.Circuits;
+using RegenTrainer.Core.Devices;
 using RegenTrainer.Core.Quantities;
 using RegenTrainer.Core.Stages;
 using RegenTrainer.Core.Tuning;
@@ -63,7 +64,7 @@ public static class HeadroomReader
         var search = new Search(ws.Circuit, cycle);
         bool ended = search.Run();
         DeviceHeadroom[] found =
-            [.. Enumerable.Range(0, devices).Select(d => new DeviceHeadroom(ws.Model.Network.Devices[d].Part.Name, search.Level(2 * d), search.Level((2 * d) + 1)))];
+            [.. Enumerable.Range(0, devices).Where(d => ws.Model.Network.Devices[d].Model is BipolarModel).Select(d => new DeviceHeadroom(ws.Model.Network.Devices[d].Part.Name, search.Level(2 * d), search.Level((2 * d) + 1)))];
         FirstLimit? first = First(found);
         return new HeadroomReading(found, first, first is null && !ended
             ? [new Caution("headroom-unsolved", "the driven stage did not settle: no limit was found")]
@@ -104,6 +105,13 @@ public static class HeadroomReader
             double expected = double.PositiveInfinity;
             for (int d = 0; d < w.Network.Devices.Count; d++)
             {
+                if (w.Network.Devices[d].Model is not BipolarModel)
+                {
+                    // A diode rectifies at any drive: it has no limits of an amplifier, so none are looked for.
+                    _levels[2 * d] = _levels[(2 * d) + 1] = new LimitLevel(double.PositiveInfinity, double.PositiveInfinity, double.PositiveInfinity);
+                    continue;
+                }
+
                 (double ampere, double volt) = cycle.SmallSignal(d);
                 double current = Math.Abs(w.Points[d].I2), left = cycle.LeastOutputVolt(d) - SaturatedBelowVolt;
                 _levels[2 * d] = current < IdleAmpere ? default(LimitLevel) : null;

@@ -1,3 +1,4 @@
+using RegenTrainer.Core.Devices;
 using RegenTrainer.Core.Quantities;
 
 namespace RegenTrainer.Core.Stages;
@@ -68,6 +69,9 @@ public sealed record Field(string Key, string Meaning, FieldKind Kind, Unit Unit
 
     /// <summary>The allowed words of a choice.</summary>
     public IReadOnlyList<string> Choices { get; init; } = [];
+
+    /// <summary>The kind of device a socket takes; without meaning for other fields.</summary>
+    public DeviceKind Socket { get; init; }
 
     /// <summary>Which default tolerance applies.</summary>
     public ToleranceKind Tolerance { get; init; }

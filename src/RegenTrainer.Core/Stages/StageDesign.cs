@@ -17,7 +17,7 @@ public sealed record StageDesign(
     string Title,
     string Note,
     ImmutableSortedDictionary<string, FieldValue> Values,
-    ImmutableSortedDictionary<string, BipolarModel> Devices,
+    ImmutableSortedDictionary<string, DeviceModel> Devices,
     ImmutableArray<Part> ExtraParts,
     string? OutputNode = null)
 {
@@ -36,6 +36,15 @@ public sealed record StageDesign(
     /// <summary>The word in force for a key, or null.</summary>
     public string? WordOrNull(string key) =>
         Values.TryGetValue(key, out FieldValue? value) ? value.Text : Family.FieldFor(key)?.DefaultText;
+
+    /// <summary>The device of a kind in a socket; null where there is none.</summary>
+    public T? DeviceOrNull<T>(string key)
+        where T : DeviceModel => Devices.GetValueOrDefault(key) as T;
+
+    /// <summary>The device of a kind in a socket.</summary>
+    /// <exception cref="InvalidOperationException">There is none: the design was not checked.</exception>
+    public T Device<T>(string key)
+        where T : DeviceModel => DeviceOrNull<T>(key) ?? throw new InvalidOperationException($"the design has no device of its kind for {key}");
 
     /// <summary>Whether the design gives a value of its own for a key.</summary>
     public bool Gives(string key) => Values.ContainsKey(key);

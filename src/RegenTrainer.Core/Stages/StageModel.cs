@@ -10,7 +10,7 @@ public sealed class StageModel
     {
         (Design, Circuit, Network) = (design, circuit, network);
         OutputIndex = network.NodeIndex(circuit.OutputNode);
-        RegeneratingType = network.Devices.FirstOrDefault(d => d.Regenerating)?.Part.Model.Name;
+        RegeneratingType = network.Devices.FirstOrDefault(d => d.Regenerating)?.Model.Name;
     }
 
     /// <summary>The design.</summary>

@@ -10,11 +10,17 @@ namespace RegenTrainer.Files.Devices;
 /// </summary>
 internal sealed class DesignDevices : IDeviceSource
 {
-    private readonly Dictionary<string, BipolarModel> _models = new(StringComparer.OrdinalIgnoreCase);
+    private readonly Dictionary<string, DeviceModel> _models = new(StringComparer.OrdinalIgnoreCase);
 
     public DesignDevices(StageDesign design)
     {
-        foreach (BipolarModel model in design.Devices.Values.Concat(design.ExtraParts.OfType<Bipolar>().Select(p => p.Model)))
+        IEnumerable<DeviceModel> ofParts = design.ExtraParts.Select(p => p switch
+        {
+            Bipolar q => q.Model,
+            Diode d => (DeviceModel)d.Model,
+            _ => null,
+        }).OfType<DeviceModel>();
+        foreach (DeviceModel model in design.Devices.Values.Concat(ofParts))
         {
             _models.TryAdd(model.Name, model);
         }
@@ -22,13 +28,15 @@ internal sealed class DesignDevices : IDeviceSource
 
     public IReadOnlyList<string> Names => [.. _models.Keys];
 
-    public DeviceReadResult Find(string name)
+    public DeviceReadResult Find(string name, DeviceKind wanted)
     {
-        if (!_models.TryGetValue(name, out BipolarModel? model))
+        if (!_models.TryGetValue(name, out DeviceModel? model) || model.Kind != wanted)
         {
             DeviceFigure figure = new(null, 1, null, null, KnownBy.Typical, "");
-            model = new BipolarModel(name, Polarity.Npn, figure, figure, figure, figure, figure, figure, figure);
-            _models.Add(name, model);
+            model = wanted == DeviceKind.Diode
+                ? new DiodeModel(name, JunctionMaterial.Germanium, figure, figure, figure, figure)
+                : new BipolarModel(name, Polarity.Npn, figure, figure, figure, figure, figure, figure, figure);
+            _models.TryAdd(name, model);
         }
 
         return new DeviceReadResult(model, []);

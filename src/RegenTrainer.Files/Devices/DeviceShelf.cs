@@ -7,7 +7,7 @@ namespace RegenTrainer.Files.Devices;
 /// </summary>
 public sealed class DeviceShelf : IDeviceSource
 {
-    private static readonly Lazy<IReadOnlyDictionary<string, BipolarModel>> _shipped = new(ReadShipped);
+    private static readonly Lazy<IReadOnlyDictionary<string, DeviceModel>> _shipped = new(ReadShipped);
 
     private readonly IReadOnlyList<string> _folders;
 
@@ -48,8 +48,11 @@ public sealed class DeviceShelf : IDeviceSource
             }
         }
 
-        return _shipped.Value.TryGetValue(name, out BipolarModel? model) ? new DeviceReadResult(model, []) : null;
+        return _shipped.Value.TryGetValue(name, out DeviceModel? model) ? new DeviceReadResult(model, []) : null;
     }
+
+    /// <inheritdoc/>
+    DeviceReadResult? IDeviceSource.Find(string name, DeviceKind wanted) => Find(name);
 
     private static string Stem(string file) => Path.GetFileNameWithoutExtension(file);
 
@@ -69,13 +72,13 @@ public sealed class DeviceShelf : IDeviceSource
         }
     }
 
-    private static Dictionary<string, BipolarModel> ReadShipped()
+    private static Dictionary<string, DeviceModel> ReadShipped()
     {
-        var devices = new Dictionary<string, BipolarModel>(StringComparer.OrdinalIgnoreCase);
+        var devices = new Dictionary<string, DeviceModel>(StringComparer.OrdinalIgnoreCase);
         foreach (string name in Embedded.Names("devices/"))
         {
             DeviceReadResult result = DeviceText.Read(Embedded.Text(name), name);
-            BipolarModel model = result.Model ?? throw new InvalidDataException(result.Faults[0].ToString());
+            DeviceModel model = result.Model ?? throw new InvalidDataException(result.Faults[0].ToString());
             devices.Add(model.Name, model);
         }
 

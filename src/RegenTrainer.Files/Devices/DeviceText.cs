@@ -7,7 +7,7 @@ namespace RegenTrainer.Files.Devices;
 /// <summary>A device file read: the model, or every fault in it.</summary>
 /// <param name="Model">The device; null where there are faults.</param>
 /// <param name="Faults">What is wrong, by position.</param>
-public sealed record DeviceReadResult(BipolarModel? Model, IReadOnlyList<FileFault> Faults);
+public sealed record DeviceReadResult(DeviceModel? Model, IReadOnlyList<FileFault> Faults);
 
 /// <summary>Reads device files.</summary>
 public static class DeviceText
@@ -35,16 +35,27 @@ public static class DeviceText
             return new DeviceReadResult(null, faults);
         }
 
-        BipolarModel? model = ReadModel(reader);
-        reader.Finish();
+        DeviceModel? model = ReadModel(reader);
         faults.Sort((a, b) => (a.Line, a.Column).CompareTo((b.Line, b.Column)));
         return new DeviceReadResult(faults.Count == 0 ? model : null, faults);
     }
 
-    private static BipolarModel? ReadModel(TableReader reader)
+    private static DeviceModel? ReadModel(TableReader reader)
     {
         string? name = reader.Text("name", required: true, "the registered type");
-        reader.Choice("kind", ["bipolar"], required: true);
+        string? kind = reader.Choice("kind", ["bipolar", "diode"], required: true);
+        if (kind is null)
+        {
+            return null;   // without a kind no other key can be judged
+        }
+
+        DeviceModel? model = kind == "diode" ? Diode(reader, name) : Bipolar(reader, name);
+        reader.Finish();
+        return model;
+    }
+
+    private static BipolarModel? Bipolar(TableReader reader, string? name)
+    {
         string? polarity = reader.Choice("polarity", ["npn", "pnp"], required: true);
         DeviceFigure? gain = Figure(reader, "current_gain", Unit.None, 1, 1e5, Unit.Ampere, required: true);
         DeviceFigure? gainLow = Figure(reader, "current_gain_low", Unit.None, 0.1, 1e5, Unit.Ampere, required: false);
@@ -54,7 +65,10 @@ public static class DeviceText
         DeviceFigure? saturation = Figure(reader, "saturation_current", Unit.Ampere, 1e-20, 1e-3, null, required: true);
         DeviceFigure? early = Figure(reader, "early_voltage", Unit.Volt, 1, 1e4, null, required: true);
         DeviceFigure? resistance = Figure(reader, "base_resistance", Unit.Ohm, 0.01, 1e5, null, required: true);
-        DeviceRating? rating = Rating(reader);
+        DeviceRating? rating = Limits(reader, inner => new DeviceRating(
+            inner.Quantity("collector_volts", Unit.Volt, 0.1, 1e4, required: false),
+            inner.Quantity("collector_current", Unit.Ampere, 1e-6, 1e3, required: false),
+            inner.Quantity("dissipation", Unit.Watt, 1e-6, 1e4, required: false)));
         if (name is null || polarity is null || gain is null || transition is null || output is null || input is null
             || saturation is null || early is null || resistance is null)
         {
@@ -69,8 +83,32 @@ public static class DeviceText
         };
     }
 
+    private static DiodeModel? Diode(TableReader reader, string? name)
+    {
+        string? material = reader.Choice("material", ["silicon", "germanium", "schottky"], required: true);
+        DeviceFigure? saturation = Figure(reader, "saturation_current", Unit.Ampere, 1e-20, 1e-3, null, required: true);
+        DeviceFigure? emission = Figure(reader, "emission_coefficient", Unit.None, 1, 4, null, required: true);
+        DeviceFigure? resistance = Figure(reader, "series_resistance", Unit.Ohm, 0.01, 1e5, null, required: true);
+        DeviceFigure? capacitance = Figure(reader, "capacitance", Unit.Farad, 1e-15, 1e-8, Unit.Volt, required: true, atRequired: false);
+        DiodeRating? rating = Limits(reader, inner => new DiodeRating(
+            inner.Quantity("reverse_volts", Unit.Volt, 0.1, 1e4, required: false),
+            inner.Quantity("forward_current", Unit.Ampere, 1e-6, 1e3, required: false)));
+        if (name is null || material is null || saturation is null || emission is null || resistance is null || capacitance is null)
+        {
+            return null;
+        }
+
+        JunctionMaterial junction = material switch
+        {
+            "silicon" => JunctionMaterial.Silicon,
+            "germanium" => JunctionMaterial.Germanium,
+            _ => JunctionMaterial.Schottky,
+        };
+        return new DiodeModel(name, junction, saturation, emission, resistance, capacitance) { Rating = rating };
+    }
+
     private static DeviceFigure? Figure(
-        TableReader reader, string key, Unit unit, double minimum, double maximum, Unit? at, bool required)
+        TableReader reader, string key, Unit unit, double minimum, double maximum, Unit? at, bool required, bool atRequired = true)
     {
         if (reader.Inner(key, required, "a table { typical = .., known = .., source = .. }") is not { } inner)
         {
@@ -81,7 +119,7 @@ public static class DeviceText
         double? low = inner.Quantity("min", unit, minimum, maximum, required: false);
         double? typical = inner.Quantity("typical", unit, minimum, maximum, required: false);
         double? high = inner.Quantity("max", unit, minimum, maximum, required: false);
-        double? condition = at is { } atUnit ? inner.Quantity("at", atUnit, 1e-12, 1e6, required: true) : null;
+        double? condition = at is { } atUnit ? inner.Quantity("at", atUnit, 1e-12, 1e6, required: atRequired) : null;
         string? known = inner.Choice("known", ["print", "memory", "typical"], required: true);
         string? source = inner.Text("source", required: known == "print", "where the figure is printed");
         inner.Finish();
@@ -104,18 +142,16 @@ public static class DeviceText
                 known switch { "print" => KnownBy.Print, "memory" => KnownBy.Memory, _ => KnownBy.Typical }, source ?? "");
     }
 
-    private static DeviceRating? Rating(TableReader reader)
+    private static T? Limits<T>(TableReader reader, Func<TableReader, T> read)
+        where T : class
     {
         if (reader.Inner("rating", required: false, "a table of limits") is not { } inner)
         {
             return null;
         }
 
-        var rating = new DeviceRating(
-            inner.Quantity("collector_volts", Unit.Volt, 0.1, 1e4, required: false),
-            inner.Quantity("collector_current", Unit.Ampere, 1e-6, 1e3, required: false),
-            inner.Quantity("dissipation", Unit.Watt, 1e-6, 1e4, required: false));
+        T limits = read(inner);
         inner.Finish();
-        return rating;
+        return limits;
     }
 }

@@ -13,6 +13,15 @@ public static class BiasJson
         Report.Write("bias", stage, SettingKeys.Of(bias.Setting), [.. bias.Cautions, .. headroom.Cautions], writer =>
         {
             writer.List("devices", bias.Devices, (w, device) => Device(w, device, headroom.Devices.FirstOrDefault(h => h.Name == device.Name)));
+            writer.List("diodes", bias.Diodes, (w, diode) =>
+            {
+                w.Word("name", diode.Name);
+                w.Word("type", diode.Type);
+                w.Number("forward_ampere", diode.ForwardAmpere);
+                w.Number("forward_volt", diode.ForwardVolt);
+                w.Number("junction_ohm", diode.JunctionOhm);
+                w.Number("junction_farad", diode.JunctionFarad);
+            });
             writer.List("nodes", bias.NodeVolts, (w, node) =>
             {
                 w.Word("node", node.Node);

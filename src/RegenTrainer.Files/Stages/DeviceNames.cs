@@ -8,8 +8,9 @@ namespace RegenTrainer.Files.Stages;
 internal static class DeviceNames
 {
     private const int MostNames = 12;
+    private const int MostLooked = 100;
 
-    public static bool TryFind(TableReader reader, IDeviceSource source, TomlText name, out BipolarModel? model)
+    public static bool TryFind(TableReader reader, IDeviceSource source, TomlText name, DeviceKind wanted, out DeviceModel? model)
     {
         model = null;
         if (name.Text.AsSpan().IndexOfAny('/', '\\', '\0') >= 0 || name.Text.Contains("..", StringComparison.Ordinal))
@@ -18,16 +19,23 @@ internal static class DeviceNames
             return false;
         }
 
-        DeviceReadResult? found = source.Find(name.Text);
+        DeviceReadResult? found = source.Find(name.Text, wanted);
         model = found?.Model;
-        if (model is not null)
+        if (model is not null && model.Kind == wanted)
         {
             return true;
         }
 
+        if (model is not null)
+        {
+            reader.Refuse(name.At, $"{name.Phrase}, {DeviceModel.Phrase(model.Kind)}", Expected(source, wanted));
+            model = null;
+            return false;
+        }
+
         if (found is null)
         {
-            reader.Refuse(name.At, name.Phrase, TableReader.Words([.. source.Names.Take(MostNames)]) + " from the shelf");
+            reader.Refuse(name.At, name.Phrase, Expected(source, wanted));
         }
         else
         {
@@ -36,5 +44,13 @@ internal static class DeviceNames
         }
 
         return false;
+    }
+
+    private static string Expected(IDeviceSource source, DeviceKind wanted)
+    {
+        IReadOnlyList<string> names =
+            [.. source.Names.Take(MostLooked).Where(n => source.Find(n, wanted)?.Model?.Kind == wanted).Take(MostNames)];
+        string kind = DeviceModel.Phrase(wanted);
+        return names.Count > 0 ? $"{kind}, {TableReader.Words(names)} from the shelf" : kind;
     }
 }

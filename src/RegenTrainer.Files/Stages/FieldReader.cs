@@ -17,7 +17,7 @@ internal sealed class FieldReader(TableReader reader, IDeviceSource devices)
     /// <param name="field">The field.</param>
     /// <param name="value">What stands there.</param>
     /// <param name="model">The device a device field names; null elsewhere.</param>
-    public FieldValue? Read(Field field, TomlValue value, out BipolarModel? model)
+    public FieldValue? Read(Field field, TomlValue value, out DeviceModel? model)
     {
         model = null;
         switch (field.Kind)
@@ -35,7 +35,7 @@ internal sealed class FieldReader(TableReader reader, IDeviceSource devices)
                 reader.Refuse(value.At, value.Phrase, TableReader.Words(field.Choices));
                 return null;
             case FieldKind.Device:
-                return Device(value, out model);
+                return Device(field, value, out model);
             default:
                 return Pairs(field, value);
         }
@@ -72,7 +72,7 @@ internal sealed class FieldReader(TableReader reader, IDeviceSource devices)
         return reader.Faults.Count == before ? new FieldValue(number, null, tolerance) : null;
     }
 
-    private FieldValue? Device(TomlValue value, out BipolarModel? model)
+    private FieldValue? Device(Field field, TomlValue value, out DeviceModel? model)
     {
         model = null;
         if (value is not TomlText text)
@@ -81,7 +81,7 @@ internal sealed class FieldReader(TableReader reader, IDeviceSource devices)
             return null;
         }
 
-        return DeviceNames.TryFind(reader, devices, text, out model) ? FieldValue.Of(text.Text) : null;
+        return DeviceNames.TryFind(reader, devices, text, field.Socket, out model) ? FieldValue.Of(text.Text) : null;
     }
 
     private FieldValue? Pairs(Field field, TomlValue value)

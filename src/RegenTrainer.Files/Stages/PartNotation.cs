@@ -63,6 +63,12 @@ internal static class PartNotation
                 Line("nodes", $"{{ base = {Notation.Quoted(q.Base)}, collector = {Notation.Quoted(q.Collector)}, emitter = {Notation.Quoted(q.Emitter)} }}");
             }
             ),
+            Diode d => ("diode", () =>
+            {
+                Line("device", Notation.Quoted(d.Model.Name));
+                Line("nodes", $"{{ anode = {Notation.Quoted(d.Anode)}, cathode = {Notation.Quoted(d.Cathode)} }}");
+            }
+            ),
             Feedback f => ("feedback", () =>
             {
                 Line("sense", Names(f.SenseFrom, f.SenseTo));

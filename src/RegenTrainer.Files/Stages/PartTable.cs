@@ -13,7 +13,7 @@ internal static class PartTable
 
     /// <summary>The kinds of part this program knows.</summary>
     public static readonly IReadOnlyList<string> Kinds =
-        ["resistor", "capacitor", "inductor", "bead", "windings", "bipolar", "supply", "antenna", "feedback"];
+        ["resistor", "capacitor", "inductor", "bead", "windings", "bipolar", "diode", "supply", "antenna", "feedback"];
 
     private const int LongestName = 100;
     private const double LeastQ = 0.01;
@@ -40,6 +40,7 @@ internal static class PartTable
                 table.Quantity("resistance", Unit.Ohm, 0, MostOf(Unit.Ohm), false) ?? 0)),
             "antenna" => Two(table, (a, b) => PickUpTable.WithWire(table, new Antenna(name, a, b))),
             "bipolar" => Bipolar(table, name, source),
+            "diode" => Diode(table, name, source),
             "feedback" => Feedback(table, name),
             "windings" => WindingsTable.Read(table, name),
             _ => null,
@@ -129,20 +130,38 @@ internal static class PartTable
 
     private static Part? Bipolar(TableReader table, string name, IDeviceSource source)
     {
+        DeviceModel? model = Device(table, source, DeviceKind.Bipolar);
+        return Leads(table, "base", "collector", "emitter") is [{ } basis, { } collector, { } emitter] && model is BipolarModel bipolar
+            ? new Bipolar(name, basis, collector, emitter, bipolar)
+            : null;
+    }
+
+    private static Part? Diode(TableReader table, string name, IDeviceSource source)
+    {
+        DeviceModel? model = Device(table, source, DeviceKind.Diode);
+        return Leads(table, "anode", "cathode") is [{ } anode, { } cathode] && model is DiodeModel diode
+            ? new Diode(name, anode, cathode, diode)
+            : null;
+    }
+
+    private static DeviceModel? Device(TableReader table, IDeviceSource source, DeviceKind wanted)
+    {
         TomlValue? device = table.Value("device", required: true, "the name of a device");
-        TableReader? nodes = table.Inner("nodes", required: true, "nodes = { base = \"..\", collector = \"..\", emitter = \"..\" }");
-        string? Node(string key) => nodes is null ? null : Name(nodes, key, $"the node of the {key}", required: true);
-        (string? basis, string? collector, string? emitter) = (Node("base"), Node("collector"), Node("emitter"));
-        nodes?.Finish();
         if (device is not null and not TomlText)
         {
             table.Refuse(device.At, device.Phrase, "the name of a device in quotes");
         }
 
-        return device is TomlText text && DeviceNames.TryFind(table, source, text, out BipolarModel? model)
-            && basis is not null && collector is not null && emitter is not null
-            ? new Bipolar(name, basis, collector, emitter, model!)
-            : null;
+        return device is TomlText text && DeviceNames.TryFind(table, source, text, wanted, out DeviceModel? model) ? model : null;
+    }
+
+    /// <summary>The nodes of a device's leads; null for each that is missing.</summary>
+    private static IReadOnlyList<string?> Leads(TableReader table, params IReadOnlyList<string> keys)
+    {
+        TableReader? nodes = table.Inner("nodes", required: true, $"nodes = {{ {string.Join(", ", keys.Select(k => $"{k} = \"..\""))} }}");
+        IReadOnlyList<string?> names = [.. keys.Select(k => nodes is null ? null : Name(nodes, k, $"the node of the {k}", required: true))];
+        nodes?.Finish();
+        return names;
     }
 
     private static Part? Feedback(TableReader table, string name)

@@ -20,7 +20,7 @@ internal sealed class StageReading
 
     private readonly IDeviceSource _source;
     private readonly ImmutableSortedDictionary<string, FieldValue>.Builder _values = ImmutableSortedDictionary.CreateBuilder<string, FieldValue>(StringComparer.Ordinal);
-    private readonly ImmutableSortedDictionary<string, BipolarModel>.Builder _devices = ImmutableSortedDictionary.CreateBuilder<string, BipolarModel>(StringComparer.Ordinal);
+    private readonly ImmutableSortedDictionary<string, DeviceModel>.Builder _devices = ImmutableSortedDictionary.CreateBuilder<string, DeviceModel>(StringComparer.Ordinal);
     private readonly StagePlaces _places = new();
     private readonly HashSet<string> _wrongTables = new(StringComparer.Ordinal);
     private readonly HashSet<string> _spoiled = new(StringComparer.Ordinal);
@@ -157,7 +157,7 @@ internal sealed class StageReading
     {
         _places.Add(field.Key, entry.Value.At);
         Entries[field.Key] = entry;
-        if (fields.Read(field, entry.Value, out BipolarModel? model) is { } value)
+        if (fields.Read(field, entry.Value, out DeviceModel? model) is { } value)
         {
             _values[field.Key] = value;
         }

@@ -80,7 +80,7 @@ internal static class StageWriting
     private static FieldValue? Wanted(StageDesign design, Field field)
     {
         FieldValue? value = design.Values.GetValueOrDefault(field.Key);
-        bool other = field.Kind == FieldKind.Device && design.Devices.TryGetValue(field.Key, out Core.Devices.BipolarModel? model)
+        bool other = field.Kind == FieldKind.Device && design.Devices.TryGetValue(field.Key, out Core.Devices.DeviceModel? model)
             && !string.Equals(model.Name, value?.Text, StringComparison.OrdinalIgnoreCase);
         return other ? FieldValue.Of(design.Devices[field.Key].Name) : value;
     }

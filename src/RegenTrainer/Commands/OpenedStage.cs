@@ -26,7 +26,7 @@ internal sealed class OpenedStage
 
     /// <summary>Polarity of the device in the regenerating socket; null where there is none.</summary>
     public Polarity? RegeneratingPolarity =>
-        Model.Network.Devices.FirstOrDefault(device => device.Regenerating)?.Part.Model.Polarity;
+        Model.Network.Devices.FirstOrDefault(device => device.Regenerating)?.Model is BipolarModel { Polarity: var polarity } ? polarity : null;
 
     /// <summary>Opens a stage.</summary>
     /// <param name="name">A path or a preset's name.</param>
@@ -52,7 +52,7 @@ internal sealed class OpenedStage
 
     /// <summary>A type by its name: beside the stage file, in the user's folder, among those that ship.</summary>
     /// <exception cref="StopException">There is none, or its file has faults.</exception>
-    public BipolarModel FindDevice(string name)
+    public DeviceModel FindDevice(string name)
     {
         DeviceShelf shelf = File.Exists(_name)
             ? DeviceShelf.Beside(Path.GetDirectoryName(Path.GetFullPath(_name)) ?? ".")

@@ -118,7 +118,12 @@ internal sealed class SettingOptions
     {
         string shown = Options.Shown(name);
         Polarity polarity = stage.RegeneratingPolarity ?? throw Misfit("--device: this stage has no device in a regenerating socket");
-        BipolarModel device = stage.FindDevice(name);
+        DeviceModel found = stage.FindDevice(name);
+        if (found is not BipolarModel device)
+        {
+            throw Misfit($"--device: found \"{shown}\", {DeviceModel.Phrase(found.Kind)}, expected {Word(polarity)} as the stage's own device");
+        }
+
         return device.Polarity == polarity
             ? device
             : throw Misfit($"--device: found \"{shown}\", {Word(device.Polarity)}, expected {Word(polarity)} as the stage's own device");

@@ -8,25 +8,31 @@ internal static class DeviceFigures
 {
     private const int NameWidth = 10;
 
-    /// <summary>What the columns of <see cref="Row"/> are.</summary>
-    public static string Heading => $"{"device",-NameWidth}{"gain",-13}f_T in MHz";
+    /// <summary>What the columns of <see cref="Row"/> are for a kind of device.</summary>
+    public static string Heading(DeviceKind kind) =>
+        $"{"device",-NameWidth}{(kind == DeviceKind.Diode ? "I_S in nA" : "gain"),-13}{(kind == DeviceKind.Diode ? "C in pF" : "f_T in MHz")}";
 
-    /// <summary>A type in one row of a list: its name, and gain and transition frequency of the least, the typical and the greatest.</summary>
-    public static string Row(BipolarModel model) =>
-        $"{Printable.Fit(model.Name, NameWidth - 1),-NameWidth}{Spread(model.CurrentGain, 1),-13}{Spread(model.TransitionFrequency, 1e6)}";
+    /// <summary>A type in one row of a list: its name, and two telling figures of the least, the typical and the greatest.</summary>
+    public static string Row(DeviceModel model)
+    {
+        (string first, string second) = model switch
+        {
+            BipolarModel bipolar => (Spread(bipolar.CurrentGain, 1), Spread(bipolar.TransitionFrequency, 1e6)),
+            DiodeModel diode => (Spread(diode.SaturationCurrent, 1e-9), Spread(diode.Capacitance, 1e-12)),
+            _ => ("", ""),
+        };
+        return $"{Printable.Fit(model.Name, NameWidth - 1),-NameWidth}{first,-13}{second}";
+    }
 
     /// <summary>Draws the figures of a type, a row each.</summary>
-    public static void Draw(Canvas canvas, Region region, BipolarModel model)
+    public static void Draw(Canvas canvas, Region region, DeviceModel model)
     {
-        (string Label, string Spread, DeviceFigure Figure, Unit At)[] figures =
-        [
-            ("gain", Spread(model.CurrentGain, 1), model.CurrentGain, Unit.Ampere),
-            ("f_T MHz", Spread(model.TransitionFrequency, 1e6), model.TransitionFrequency, Unit.Ampere),
-            ("C_cb pF", Spread(model.OutputCapacitance, 1e-12), model.OutputCapacitance, Unit.Volt),
-            ("C_eb pF", Spread(model.InputCapacitance, 1e-12), model.InputCapacitance, Unit.Volt),
-            ("r_b \u03a9", Spread(model.BaseResistance, 1), model.BaseResistance, Unit.Ohm),
-            ("V_Early", Spread(model.EarlyVoltage, 1), model.EarlyVoltage, Unit.Volt),
-        ];
+        (string Label, string Spread, DeviceFigure Figure, Unit At)[] figures = model switch
+        {
+            BipolarModel bipolar => Bipolar(bipolar),
+            DiodeModel diode => Diode(diode),
+            _ => [],
+        };
         for (int k = 0; k < figures.Length && k < region.Height; k++)
         {
             (string label, string spread, DeviceFigure figure, Unit unit) = figures[k];
@@ -35,6 +41,24 @@ internal static class DeviceFigures
             canvas.Put(region.Left + NameWidth - 2, region.Top + k, $"{spread}{at}, {Known(figure)}", Ink.Text, region.Right);
         }
     }
+
+    private static (string, string, DeviceFigure, Unit)[] Bipolar(BipolarModel model) =>
+    [
+        ("gain", Spread(model.CurrentGain, 1), model.CurrentGain, Unit.Ampere),
+        ("f_T MHz", Spread(model.TransitionFrequency, 1e6), model.TransitionFrequency, Unit.Ampere),
+        ("C_cb pF", Spread(model.OutputCapacitance, 1e-12), model.OutputCapacitance, Unit.Volt),
+        ("C_eb pF", Spread(model.InputCapacitance, 1e-12), model.InputCapacitance, Unit.Volt),
+        ("r_b \u03a9", Spread(model.BaseResistance, 1), model.BaseResistance, Unit.Ohm),
+        ("V_Early", Spread(model.EarlyVoltage, 1), model.EarlyVoltage, Unit.Volt),
+    ];
+
+    private static (string, string, DeviceFigure, Unit)[] Diode(DiodeModel model) =>
+    [
+        ("I_S nA", Spread(model.SaturationCurrent, 1e-9), model.SaturationCurrent, Unit.Volt),
+        ("n", Spread(model.EmissionCoefficient, 1), model.EmissionCoefficient, Unit.Volt),
+        ("r_s \u03a9", Spread(model.SeriesResistance, 1), model.SeriesResistance, Unit.Ampere),
+        ("C pF", Spread(model.Capacitance, 1e-12), model.Capacitance, Unit.Volt),
+    ];
 
     private static string Known(DeviceFigure figure) => figure.Known switch
     {

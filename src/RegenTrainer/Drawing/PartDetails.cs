@@ -25,7 +25,7 @@ internal static class PartDetails
         if (field.Kind == FieldKind.Device)
         {
             row = PutLine(canvas, region, row, origin, Ink.Text);
-            if (design.Devices.TryGetValue(field.Key, out BipolarModel? model))
+            if (design.Devices.TryGetValue(field.Key, out DeviceModel? model))
             {
                 DeviceFigures.Draw(canvas, region with { Top = row, Height = region.Bottom - row }, model);
             }

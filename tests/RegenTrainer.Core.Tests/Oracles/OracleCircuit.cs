@@ -106,6 +106,10 @@ internal sealed class OracleCircuit
                 Grade own = q.Role == PartRole.Regenerating ? grade : Grade.Typical;
                 AddDevice(new OracleDevice(q.Name, q.Base, q.Collector, q.Emitter, q.Model.BaseOhm(own), q.Model.LawAt(own, _temperatureCelsius)));
                 break;
+            case Diode d:
+                AddDevice(new OracleDevice(
+                    d.Name, d.Anode, Part.Earth, d.Cathode, d.Model.LeadOhm(Grade.Typical), d.Model.LawAt(Grade.Typical, _temperatureCelsius)));
+                break;
             default:
                 throw new NotSupportedException($"the carrier-level truth has no stamp for {part.GetType().Name} {part.Name}");
         }

@@ -14,7 +14,7 @@ internal sealed class FreeFamily(IReadOnlyList<Part> parts, string output, Dial 
     public static StageDesign Design(
         IReadOnlyList<Part> parts, string output, VariableCapacitor capacitor, IControlLaw? law = null, Unit unit = Unit.Ohm) => new(
             new FreeFamily(parts, output, new Dial(530e3, 1700e3, 10e3, capacitor), law, unit), "free", "",
-            ImmutableSortedDictionary<string, FieldValue>.Empty, ImmutableSortedDictionary<string, BipolarModel>.Empty, []);
+            ImmutableSortedDictionary<string, FieldValue>.Empty, ImmutableSortedDictionary<string, DeviceModel>.Empty, []);
 
     public override IReadOnlyList<FieldFault> Check(StageDesign design) => [];
 

@@ -57,7 +57,7 @@ public sealed class HeadroomReaderTests
     public void A_pnp_stage_has_the_headroom_of_its_mirror()
     {
         BipolarModel pnp = DefaultStage.Bc547b with { Name = "mirror", Polarity = Polarity.Pnp };
-        ImmutableSortedDictionary<string, BipolarModel> devices =
+        ImmutableSortedDictionary<string, DeviceModel> devices =
             DefaultStage.Design.Devices.SetItem("devices.main", pnp).SetItem("devices.follower", pnp);
         FirstLimit npn = HeadroomReader.Read(StageUnderTest.Default.Workspace, new Setting(1e6, 45)).First!;
         FirstLimit mirror = HeadroomReader.Read(new StageUnderTest(DefaultStage.Design with { Devices = devices }).Workspace, new Setting(1e6, 45)).First!;

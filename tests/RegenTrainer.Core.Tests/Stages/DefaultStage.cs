@@ -17,7 +17,7 @@ internal static class DefaultStage
         "Tern Point preselector",
         "Medium wave, two cells, regeneration by a rheostat in the emitter.",
         Values(),
-        ImmutableSortedDictionary<string, BipolarModel>.Empty.Add("devices.main", Bc547b).Add("devices.follower", Bc547b),
+        ImmutableSortedDictionary<string, DeviceModel>.Empty.Add("devices.main", Bc547b).Add("devices.follower", Bc547b),
         []);
 
     /// <summary>The stage with one number changed.</summary>

@@ -14,7 +14,7 @@ internal static class PlainStage
             "Plain tank",
             "",
             ImmutableSortedDictionary<string, FieldValue>.Empty,
-            ImmutableSortedDictionary<string, BipolarModel>.Empty,
+            ImmutableSortedDictionary<string, DeviceModel>.Empty,
             [])
         .With("dial.low", FieldValue.Of(530e3))
         .With("dial.high", FieldValue.Of(1700e3))

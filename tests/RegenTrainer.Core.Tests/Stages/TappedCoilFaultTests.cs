@@ -68,7 +68,7 @@ public sealed class TappedCoilFaultTests
     [Fact]
     public void A_missing_device_is_a_fault()
     {
-        StageDesign design = DefaultStage.Design with { Devices = ImmutableSortedDictionary<string, BipolarModel>.Empty };
+        StageDesign design = DefaultStage.Design with { Devices = ImmutableSortedDictionary<string, DeviceModel>.Empty };
         Assert.Equal(["devices.main", "devices.follower"], Check(design).Select(f => f.Key));
     }
 

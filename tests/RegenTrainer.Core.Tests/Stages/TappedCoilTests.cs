@@ -172,7 +172,7 @@ public sealed class TappedCoilTests
         BipolarModel pnp = DefaultStage.Bc547b with { Name = "BC557B", Polarity = Polarity.Pnp };
         StageDesign design = DefaultStage.Design with
         {
-            Devices = ImmutableSortedDictionary<string, BipolarModel>.Empty.Add("devices.main", pnp).Add("devices.follower", pnp),
+            Devices = ImmutableSortedDictionary<string, DeviceModel>.Empty.Add("devices.main", pnp).Add("devices.follower", pnp),
         };
         Assert.Empty(design.Family.Check(design));
         StageCircuit mirrored = Expand(design);

@@ -67,7 +67,7 @@ public sealed class ReportKeyTests
 
         JsonElement bias = Parse(BiasJson.Write("S", SampleAnswers.Bias, SampleAnswers.Headroom));
         Assert.Equal(
-            Head + "devices nodes supply_ampere residual_ampere first_limit_device first_limit first_limit_antenna_volt "
+            Head + "devices diodes nodes supply_ampere residual_ampere first_limit_device first_limit first_limit_antenna_volt "
             + "first_limit_tank_volt first_limit_output_volt supply_fresh_ampere supply_tired_ampere battery_life_s per_kelvin "
             + "per_tenth_volt",
             Keys(bias));
@@ -79,6 +79,7 @@ public sealed class ReportKeyTests
             + "current_gain dissipation_watt saturated cut_off_antenna_volt cut_off_tank_volt cut_off_output_volt "
             + "saturation_antenna_volt saturation_tank_volt saturation_output_volt",
             Keys(bias.GetProperty("devices")[0]));
+        Assert.Equal("name type forward_ampere forward_volt junction_ohm junction_farad", Keys(bias.GetProperty("diodes")[0]));
         Assert.Equal("node volt", Keys(bias.GetProperty("nodes")[0]));
 
         JsonElement coil = Parse(CoilJson.Write(null, SampleAnswers.Coil));

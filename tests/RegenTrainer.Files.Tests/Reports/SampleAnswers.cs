@@ -81,6 +81,7 @@ internal static class SampleAnswers
         1e-17)
     {
         Battery = new BatteryLife(3.2, 2.2, 1.7e-3, 1.1e-3, 5e6),
+        Diodes = [new DiodeBias("detector", "1N34A", 1e-6, 0.02, 2.6e4, 1e-12)],
         PerKelvin = new BiasDrift(2e-6, -0.02, 3, -1),
     };
 

@@ -36,7 +36,7 @@ public sealed class BadStageTests
     {
         var golden = new StringBuilder();
         int count = 0;
-        foreach ((string name, string text) in Cases().Concat(CasesOfChoices()))
+        foreach ((string name, string text) in Cases().Concat(CasesOfChoices()).Concat(DeviceCases()))
         {
             StageReadResult result = StageText.Read(text, name + ".toml", DeviceShelf.Shipped);
             Assert.Null(result.Design);
@@ -186,6 +186,7 @@ public sealed class BadStageTests
             .Replace("turns = 84", "turns = \"many\"", StringComparison.Ordinal).Replace("[layout]", "[layouts]", StringComparison.Ordinal)
             .Replace("main = \"BC547B\"", "main = \"NONE\"", StringComparison.Ordinal));
     }
+
     /// <summary>Cores and antennas: what a choice asks for, and what has no meaning with it.</summary>
     private static IEnumerable<(string Name, string Text)> CasesOfChoices()
     {
@@ -204,5 +205,26 @@ public sealed class BadStageTests
         yield return Edited("no-coupling-to-a-short-wire", "coupling = \"5p\"", "");
         yield return Edited("long-wire-without-a-wire", "kind = \"short-wire\"", "kind = \"long-wire\"");
         yield return Edited("long-wire-too-high", "capacitance = \"60p\"\nearth", "wire = { length = \"10 m\", height = \"12 m\" }\nearth", "kind = \"short-wire\"", "kind = \"long-wire\"");
+    }
+
+    /// <summary>Devices of another kind than their socket's, and diodes wired wrong.</summary>
+    private static IEnumerable<(string Name, string Text)> DeviceCases()
+    {
+        string preset = Presets.Text(Presets.Default);
+        (string, string) Edited(string name, string old, string now) => (name, preset.Replace(old, now, StringComparison.Ordinal));
+        (string, string) Extra(string name, string more) => (name, preset + "\n" + more);
+
+        yield return Edited("diode-for-a-transistor", "main = \"BC547B\"", "main = \"1N34A\"");
+        yield return Edited("transistor-for-a-diode", "follower = \"BC547B\"", "follower = \"BC547B\"\ndetector = \"BC547B\"");
+        yield return Edited("unknown-diode", "follower = \"BC547B\"", "follower = \"BC547B\"\ndetector = \"1N34Z\"");
+        yield return Edited("crystal-set-without-a-diode", "kind = \"follower\"", "kind = \"crystal-set\"");
+        yield return Edited("detector-on-an-unknown-tap", "kind = \"follower\"", "tap = \"collector\"\nkind = \"follower\"");
+        yield return Edited("bypass-of-the-wrong-unit", "kind = \"follower\"", "bypass = \"47k\"\nkind = \"follower\"");
+        yield return Extra("diode-part-between", "[[part]]\nkind = \"diode\"\nname = \"x\"\ndevice = \"1N34A\"\nbetween = [\"collector\", \"earth\"]\n");
+        yield return Extra("diode-part-without-cathode", "[[part]]\nkind = \"diode\"\nname = \"x\"\ndevice = \"1N34A\"\nnodes = { anode = \"collector\" }\n");
+        yield return Extra("diode-part-of-a-transistor", "[[part]]\nkind = \"diode\"\nname = \"x\"\ndevice = \"BC547B\"\nnodes = { anode = \"collector\", cathode = \"earth\" }\n");
+        yield return Extra("transistor-part-of-a-diode", "[[part]]\nkind = \"bipolar\"\nname = \"x\"\ndevice = \"BAT46\"\nnodes = { base = \"collector\", collector = \"supply rail\", emitter = \"earth\" }\n");
+        yield return Extra("regenerating-diode", "[[part]]\nkind = \"diode\"\nname = \"x\"\ndevice = \"1N34A\"\nnodes = { anode = \"collector\", cathode = \"earth\" }\nrole = \"regenerating\"\n");
+        yield return Extra("diode-to-nowhere", "[[part]]\nkind = \"diode\"\nname = \"x\"\ndevice = \"1N34A\"\nnodes = { anode = \"here\", cathode = \"there\" }\n");
     }
 }

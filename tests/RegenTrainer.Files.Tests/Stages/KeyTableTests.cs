@@ -1,4 +1,5 @@
 using System.Text;
+using RegenTrainer.Core.Devices;
 using RegenTrainer.Core.Quantities;
 using RegenTrainer.Core.Stages;
 using RegenTrainer.Core.Stages.Families;
@@ -33,7 +34,7 @@ public sealed class KeyTableTests
         FieldKind.Quantity => $"{QuantityText.Write(field.Minimum, field.Unit)} to {QuantityText.Write(field.Maximum, field.Unit)}",
         FieldKind.Count => $"whole number, {field.Minimum:0} to {field.Maximum:0}",
         FieldKind.Choice => string.Join(", ", field.Choices.Select(c => $"`{c}`")),
-        FieldKind.Device => "a device's name",
+        FieldKind.Device => $"the name of {DeviceModel.Phrase(field.Socket)}",
         _ => "pairs `[[a, b], ...]`",
     };
 

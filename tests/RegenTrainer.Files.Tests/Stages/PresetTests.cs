@@ -11,11 +11,11 @@ public sealed class PresetTests
     public static TheoryData<string> Names => [.. Presets.Names];
 
     [Fact]
-    public void Presets_ship_for_every_antenna_and_core()
+    public void Presets_ship_for_every_antenna_core_and_output()
     {
         string[] ship =
         [
-            "ferrite-rod", "frame-loop", "long-wave-ring", "long-wire", "plain-tank", "short-wave-ring", "tapped-coil-follower-off",
+            "crystal-set", "ferrite-rod", "frame-loop", "long-wave-ring", "long-wire", "plain-tank", "short-wave-ring", "tapped-coil-follower-off",
             "tapped-coil-npn", "tapped-coil-pnp",
         ];
         Assert.Empty(ship.Except(Presets.Names));

@@ -78,7 +78,7 @@ public sealed class StageWritingTests
     [Fact]
     public void Title_note_and_device_are_written_and_hostile_text_is_escaped()
     {
-        BipolarModel strong = DeviceShelf.Shipped.Find("2n5088")!.Model!;
+        DeviceModel strong = DeviceShelf.Shipped.Find("2n5088")!.Model!;
         StageDesign changed = _design with
         {
             Title = "a \"quoted\" \\ title\n\u0007",

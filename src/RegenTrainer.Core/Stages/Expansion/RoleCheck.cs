@@ -26,7 +26,7 @@ internal static class RoleCheck
                     OfKind(part, part is Resistor or Feedback, "regeneration", "a resistor or a feedback element", faults);
                     break;
                 case PartRole.Regenerating:
-                    OfKind(part, part is Bipolar or Feedback, "regenerating", "a device or a feedback element", faults);
+                    OfKind(part, part is Bipolar or Feedback, "regenerating", "a bipolar device or a feedback element", faults);
                     break;
                 default:
                     break;
@@ -66,6 +66,7 @@ internal static class RoleCheck
         Antenna => "an antenna",
         Feedback => "a feedback element",
         Bipolar => "a bipolar device",
+        Diode => "a diode",
         _ => "another kind of part",
     };
 }

@@ -16,8 +16,10 @@ public sealed class PlainTank : Family
             [
                 .. DialFields.All,
                 .. TankFields.All,
+                DetectorFields.Socket,
                 .. FactorFields.With(0.03),
                 .. AntennaFields.All,
+                .. DetectorFields.OnTank,
                 .. OutputFields.LoadBehind(1e-12, 1e6),
                 .. RangeFields.Temperature,
                 .. ToleranceFields.All,
@@ -40,6 +42,8 @@ public sealed class PlainTank : Family
         DialFields.Check(design, faults);
         FactorFields.Check(design, faults);
         AntennaFields.Check(design, faults);
+        SocketCheck.Check(design, faults);
+        DetectorFields.Check(design, faults);
         RangeFields.Check(design, null, faults);
         CircuitCheck.CheckExpansion(this, design, faults);
         return faults.Faults;
@@ -53,8 +57,10 @@ public sealed class PlainTank : Family
         DialFields.AddParts(design, parts, TankTop);
         TankFields.AddParts(design, parts, control.Law.ValueAtStart, TankTop);
         AntennaFields.AddParts(design, parts, TankTop);
-        OutputFields.AddLoad(design, parts, TankTop);
+        string output = design.Word(OutputFields.Kind) == OutputFields.CrystalSet
+            ? DetectorFields.AddParts(design, parts, TankTop)
+            : OutputFields.AddLoad(design, parts, TankTop);
         parts.AddRange(design.ExtraParts);
-        return new StageCircuit(parts.Parts, OutputFields.Node, DialFields.Build(design), control, null);
+        return new StageCircuit(parts.Parts, output, DialFields.Build(design), control, null);
     }
 }

@@ -56,6 +56,7 @@ public sealed class TappedCoil : Family
         BiasFields.Check(design, faults);
         PotentiometerFields.Check(design, faults);
         CoilAntennaFields.Check(design, faults);
+        SocketCheck.Check(design, faults);
         OutputFields.Check(design, faults);
         RangeFields.Check(design, design.Number(BiasFields.Supply), faults);
         CircuitCheck.CheckExpansion(this, design, faults);
@@ -75,13 +76,15 @@ public sealed class TappedCoil : Family
         DialFields.AddParts(design, parts, TankTop);
         parts.AddCapacitor("emitter tap wiring", EmitterTap, Part.Earth, tapLead);
         parts.AddCapacitor("base tap wiring", baseTap, Part.Earth, tapLead);
-        bool negative = design.Devices[BiasFields.MainDevice].Polarity == Polarity.Pnp;
+        bool negative = design.Device<BipolarModel>(BiasFields.MainDevice).Polarity == Polarity.Pnp;
         BiasFields.AddSupply(design, parts, Rail, negative);
         BiasFields.AddMain(design, parts, Rail, Collector, Emitter, baseTap);
         RegenerationFields.AddParts(design, parts, control.Law, Emitter, EmitterTap);
         AntennaFields.AddParts(design, parts, TankTop);
-        OutputFields.AddParts(design, parts, Rail, Collector);
+        string output = design.Word(OutputFields.Kind) == OutputFields.CrystalSet
+            ? DetectorFields.AddOnCoil(design, parts, EmitterTap, baseTap, TankTop, Rail, negative)
+            : OutputFields.AddParts(design, parts, Rail, Collector);
         parts.AddRange(design.ExtraParts);
-        return new StageCircuit(parts.Parts, OutputFields.Node, DialFields.Build(design), control, design.Number(BiasFields.Supply));
+        return new StageCircuit(parts.Parts, output, DialFields.Build(design), control, design.Number(BiasFields.Supply));
     }
 }

@@ -1,4 +1,5 @@
 using RegenTrainer.Core.Circuits;
+using RegenTrainer.Core.Devices;
 using RegenTrainer.Core.Quantities;
 using RegenTrainer.Core.Stages.Expansion;
 
@@ -40,8 +41,9 @@ public static class BiasFields
     /// <summary>The sockets.</summary>
     public static IReadOnlyList<Field> Devices { get; } =
     [
-        FieldOf.Device(MainDevice, "regenerating device") with { Required = true },
-        FieldOf.Device(FollowerDevice, "device of the output follower"),
+        FieldOf.Device(MainDevice, "regenerating device", DeviceKind.Bipolar) with { Required = true },
+        FieldOf.Device(FollowerDevice, "device of the output follower", DeviceKind.Bipolar),
+        DetectorFields.Socket,
     ];
 
     /// <summary>The battery behind the supply.</summary>
@@ -79,7 +81,7 @@ public static class BiasFields
         parts.Add(new Resistor("base resistor", collector, feed, design.Number(BaseResistor)));
         string @base = parts.ThroughResistor("base stopper", feed, design.Number(BaseStopper), "base");
         parts.AddCapacitor("base wiring", @base, Part.Earth, design.Number(LayoutFields.BaseLead));
-        parts.Add(new Bipolar("main", @base, collector, emitter, design.Devices[MainDevice]) { Role = PartRole.Regenerating });
+        parts.Add(new Bipolar("main", @base, collector, emitter, design.Device<BipolarModel>(MainDevice)) { Role = PartRole.Regenerating });
         parts.Add(new Resistor("collector resistor", rail, collector, design.Number(CollectorResistor)));
     }
 

@@ -1,3 +1,4 @@
+using RegenTrainer.Core.Devices;
 using RegenTrainer.Core.Quantities;
 
 namespace RegenTrainer.Core.Stages.Fields;
@@ -65,7 +66,8 @@ internal static class FieldOf
         new(key, meaning, FieldKind.Choice, Unit.None, 0, 0) { DefaultText = defaultWord, Choices = words };
 
     /// <summary>The name of a device on the shelf.</summary>
-    public static Field Device(string key, string meaning) => new(key, meaning, FieldKind.Device, Unit.None, 0, 0);
+    public static Field Device(string key, string meaning, DeviceKind kind) =>
+        new(key, meaning, FieldKind.Device, Unit.None, 0, 0) { Socket = kind };
 
     /// <summary>Measured pairs; the range is that of every number in it.</summary>
     public static Field Pairs(string key, string meaning, double minimum, double maximum) =>

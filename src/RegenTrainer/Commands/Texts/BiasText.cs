@@ -25,6 +25,16 @@ internal static class BiasText
             sheet.Row("dissipation", Say.Quantity(device.DissipationWatt, Unit.Watt));
         }
 
+        foreach (DiodeBias diode in bias.Diodes)
+        {
+            sheet.Gap();
+            sheet.Line($"{diode.Name}: {diode.Type}");
+            sheet.Row("forward current", Say.Quantity(diode.ForwardAmpere, Unit.Ampere));
+            sheet.Row("anode to cathode", Say.Quantity(diode.ForwardVolt, Unit.Volt));
+            sheet.Row("junction resistance", Say.Quantity(diode.JunctionOhm, Unit.Ohm));
+            sheet.Row("junction capacitance", Say.Quantity(diode.JunctionFarad, Unit.Farad));
+        }
+
         Headroom(sheet, headroom);
 
         if (bias.NodeVolts.Count > 0)

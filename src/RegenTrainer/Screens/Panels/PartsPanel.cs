@@ -1,4 +1,3 @@
-using RegenTrainer.Core.Devices;
 using RegenTrainer.Core.Stages;
 using RegenTrainer.Drawing;
 using RegenTrainer.Session;
@@ -171,9 +170,9 @@ internal sealed class PartsPanel : IPanel
                 IReadOnlyList<string> names = _workbench.Devices(field.Key);
                 OpenPick(
                     field,
-                    DeviceFigures.Heading,
+                    DeviceFigures.Heading(field.Socket),
                     names,
-                    [.. names.Select(name => _workbench.Device(name) is BipolarModel model ? DeviceFigures.Row(model) : name)]);
+                    [.. names.Select(name => _workbench.Device(name) is { } model ? DeviceFigures.Row(model) : name)]);
                 break;
             case FieldKind.Pairs:
                 _refusal = "a table of measured pairs is edited in the file";
