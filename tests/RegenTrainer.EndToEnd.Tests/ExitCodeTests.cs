@@ -19,6 +19,7 @@ public sealed class ExitCodeTests
             (["reading", Stage, "--dial", "1k5F"], "--dial"),
             (["reading", Stage, "--grade", "middling"], "weak or typical or strong"),
             (["reading", Stage, "--dial", "1M", "--capacitor", "143p"], "expected one of the two"),
+            (["reading", Stage, "--device", "1N34A"], "--device: found \"1N34A\", a diode, expected an NPN type"),
             (["reading", Stage, "--device", "no such type\u001b[31m"], "--device"),
             (["--json", "reading", Stage], "before the command"),
             (["coil", Stage, "--turns", "84"], "--turns"),

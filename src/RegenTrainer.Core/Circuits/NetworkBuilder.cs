@@ -7,7 +7,7 @@ internal sealed class NetworkBuilder
 {
     private readonly Dictionary<(int Row, int Column), int> _entries = [];
     private readonly HashSet<int> _capacitive = [];
-    private readonly List<(int A, int B, JoinKind Kind)> _joins = [];
+    private readonly Joins _joins = new();
 
     public NetworkBuilder(IReadOnlyList<Part> parts)
     {
@@ -34,13 +34,6 @@ internal sealed class NetworkBuilder
         {
             Entry(i, i);   // every diagonal can be pinned
         }
-    }
-
-    private enum JoinKind
-    {
-        Direct,
-        Alternating,
-        RegeneratingDirect,
     }
 
     public IReadOnlyList<Part> Parts { get; }
@@ -76,38 +69,12 @@ internal sealed class NetworkBuilder
     /// <summary>The diagonal entries of one node in each island without a path to earth, for four ways of looking at the joins.</summary>
     public (int[] Always, int[] Direct, int[] DirectRemoved, int[] Removed) FindPins()
     {
-        int[] always = Islands(_ => true);
-        int[] direct = Islands(kind => kind != JoinKind.Alternating);
-        int[] directRemoved = Islands(kind => kind == JoinKind.Direct);
-        int[] removed = Islands(kind => kind != JoinKind.RegeneratingDirect);
-        return (always, direct, directRemoved, removed);
-    }
-
-    private int[] Islands(Func<JoinKind, bool> counts)
-    {
-        int nodes = UnknownNames.Count;
-        int[] parent = [.. Enumerable.Range(0, nodes + 1)];   // the last one is earth
-        int Root(int i)
-        {
-            while (parent[i] != i)
-            {
-                i = parent[i] = parent[parent[i]];
-            }
-
-            return i;
-        }
-
-        foreach ((int a, int b, JoinKind kind) in _joins)
-        {
-            if (counts(kind))
-            {
-                parent[Root(a < 0 ? nodes : a)] = Root(b < 0 ? nodes : b);
-            }
-        }
-
         HashSet<int> branches = [.. Branches.Select(b => b.Unknown)];
-        return [.. Enumerable.Range(0, nodes).Where(i => !branches.Contains(i)).GroupBy(Root)
-            .Where(g => g.Key != Root(nodes)).Select(g => _entries[(g.First(), g.First())])];
+        int[] Pins(Func<JoinKind, bool> counts) =>
+            [.. _joins.Islands(UnknownNames.Count, branches, counts).Select(node => _entries[(node, node)])];
+        return (
+            Pins(_ => true), Pins(kind => kind != JoinKind.Alternating), Pins(kind => kind == JoinKind.Direct),
+            Pins(kind => kind != JoinKind.RegeneratingDirect));
     }
 
     private int Index(string node) => string.Equals(node, Part.Earth, StringComparison.Ordinal) ? -1 : Nodes[node];
@@ -161,7 +128,7 @@ internal sealed class NetworkBuilder
         {
             case Resistor r:
                 PairStamp pair = Pair(Index(r.From), Index(r.To), capacitive: false);
-                _joins.Add((Index(r.From), Index(r.To), JoinKind.Direct));
+                _joins.Add(Index(r.From), Index(r.To), JoinKind.Direct);
                 if (r.Role == PartRole.Regeneration)
                 {
                     SetControl(new ControlStamp(pair, -1));
@@ -223,7 +190,7 @@ internal sealed class NetworkBuilder
     private void AddCapacitor(int from, int to, double farad, double? q, bool tuning)
     {
         var stamp = new CapacitorStamp(Pair(from, to, capacitive: true), farad, q);
-        _joins.Add((from, to, JoinKind.Alternating));
+        _joins.Add(from, to, JoinKind.Alternating);
         if (!tuning)
         {
             Capacitors.Add(stamp);
@@ -251,7 +218,7 @@ internal sealed class NetworkBuilder
         }
 
         Capacitive(stamp.Diagonal);
-        _joins.Add((f, t, JoinKind.Direct));
+        _joins.Add(f, t, JoinKind.Direct);
         Branches.Add(stamp);
         return unknown;
     }
@@ -333,11 +300,11 @@ internal sealed class NetworkBuilder
 
         bool regenerating = part.Role == PartRole.Regenerating;
         JoinKind kind = regenerating ? JoinKind.RegeneratingDirect : JoinKind.Direct;
-        _joins.Add((Index(control), inner, JoinKind.Direct));
-        _joins.Add((inner, terminals[2], kind));
+        _joins.Add(Index(control), inner, JoinKind.Direct);
+        _joins.Add(inner, terminals[2], kind);
         if (output is not null)
         {
-            _joins.Add((inner, terminals[1], kind));
+            _joins.Add(inner, terminals[1], kind);
         }
 
         Devices.Add(new DeviceStamp(

@@ -65,7 +65,7 @@ internal sealed class OpenedStage
 
         return found?.Model ?? throw new StopException(
             ExitCode.CommandLine,
-            $"regentrainer: --device: found \"{Options.Shown(name)}\", expected one of {string.Join(", ", shelf.Names)}");
+            $"regentrainer: --device: found \"{Options.Shown(name)}\", expected one of {string.Join(", ", shelf.Names.Where(n => shelf.Find(n)?.Model is BipolarModel))}");
     }
 
     private static OpenedFile Read(string name)
