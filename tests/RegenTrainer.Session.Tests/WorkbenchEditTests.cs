@@ -88,7 +88,7 @@ public sealed class WorkbenchEditTests : IDisposable
     [InlineData("coil.turns", "80.5", "at character 1: found 80.5, expected a whole number from 1 to 5000")]
     [InlineData("coil.turns", "many", "at character 1: found `m`")]
     [InlineData("output.kind", "ear", "at character 1: found \"ear\", expected one of \"follower\", \"load\"")]
-    [InlineData("devices.main", "ZZ1", "at character 1: found \"ZZ1\", expected one of ")]
+    [InlineData("devices.main", "ZZ1", "at character 1: found \"ZZ1\", expected a bipolar device, one of ")]
     [InlineData("devices.main", "../x", "at character 1: found \"../x\", expected the name of a device, not a path")]
     [InlineData("dial.capacitor.table", "0, 1", "at character 2: found a comma")]
     [InlineData("dial.capacitor.table", "0.5", "at character 1: found 0.5, expected a list of pairs")]

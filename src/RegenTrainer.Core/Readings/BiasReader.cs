@@ -29,14 +29,17 @@ public static class BiasReader
         DeviceBias[] devices = [.. Enumerable.Range(0, model.Network.Devices.Count)
             .Where(d => model.Network.Devices[d].Model is BipolarModel).Select(d => Device(w, d, setting, cautions))];
         (string, double)[] nodes = [.. model.Network.NodeNames.Select(n => (n, w.Voltages[model.Network.NodeIndex(n)]))];
+        IReadOnlyList<DiodeBias> diodes = DiodeBias.ReadAll(w, cautions);
         double? supply = BatteryReader.Ampere(w);
+
+        // These solve the stage elsewhere: nothing of this operating point is left in the workspace after them.
         (BiasDrift? perKelvin, BiasDrift? perTenthVolt) = DriftReader.Read(ws, setting);
         return new BiasReading(inForce, cautions, devices, nodes, supply, bias.ResidualAmpere)
         {
             Battery = BatteryReader.TryRead(ws, setting),
             PerKelvin = perKelvin,
             PerTenthVolt = perTenthVolt,
-            Diodes = DiodeBias.ReadAll(w, cautions),
+            Diodes = diodes,
         };
     }
 

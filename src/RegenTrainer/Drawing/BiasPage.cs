@@ -19,6 +19,8 @@ internal static class BiasPage
     private const int LabelWidth = 11;
     private const int ColumnWidth = 9;
 
+    private static readonly string[] _labels = ["type", "collector", "base", "V C-E", "V B-E", "slope", "gain", "power", "cut off at", "saturated"];
+
     /// <summary>Draws the page.</summary>
     public static void Draw(Canvas canvas, Region region, BiasPicture picture)
     {
@@ -58,6 +60,7 @@ internal static class BiasPage
         int column = region.Left + LabelWidth;
         bool first = true;
         Labels(canvas, region);
+        Diodes(canvas, region, answer.Bias.Diodes);
         foreach (DeviceBias device in devices)
         {
             if (column + ColumnWidth > region.Right + 1)
@@ -81,13 +84,23 @@ internal static class BiasPage
 
     private static void Labels(Canvas canvas, Region region)
     {
-        string[] labels = ["type", "collector", "base", "V C-E", "V B-E", "slope", "gain", "power", "cut off at", "saturated"];
-        for (int k = 0; k < labels.Length; k++)
+        for (int k = 0; k < _labels.Length; k++)
         {
-            canvas.Put(region.Left, region.Top + 1 + k, labels[k], Ink.Label, region.Left + LabelWidth);
+            canvas.Put(region.Left, region.Top + 1 + k, _labels[k], Ink.Label, region.Left + LabelWidth);
         }
 
-        canvas.Put(region.Left, region.Top + 1 + labels.Length, "(peak antenna EMF at the station)", Ink.Label, region.Right);
+        canvas.Put(region.Left, region.Top + 1 + _labels.Length, "(peak antenna EMF at the station)", Ink.Label, region.Right);
+    }
+
+    private static void Diodes(Canvas canvas, Region region, IReadOnlyList<DiodeBias> diodes)
+    {
+        int row = region.Top + _labels.Length + 2;
+        foreach (DiodeBias diode in diodes.Take(Math.Max(0, region.Bottom - row)))
+        {
+            string figures = $"{Figures.Quantity(diode.JunctionOhm, Unit.Ohm)}, {Figures.Quantity(diode.JunctionFarad, Unit.Farad)}";
+            canvas.Put(region.Left, row, Printable.Fit($"{diode.Name} {diode.Type}", 20), Ink.Label, region.Right);
+            canvas.PutBefore(region.Right - 1, row++, figures, Ink.Text);
+        }
     }
 
     private static void Column(Canvas canvas, Region region, int column, string head, string[] cells, Ink ink)
