@@ -16,7 +16,7 @@ internal static class Figures
         (nameof(StageBenchmark.TankUpdate), "tank mode and operating point after a step of the control", 5),
         (nameof(StageBenchmark.TipOverAlongTravel), "tip-over along the whole travel", 400),
         (nameof(StageBenchmark.CompleteReading), "complete reading", 1000),
-        (nameof(StageBenchmark.DialThreeGrades), "dial, three grades, 60 points, on two threads", 60000),
+        (nameof(StageBenchmark.DialThreeGrades), "Dial page: three grades, 60 points each", 60000),
     ];
 
     /// <summary>Runs and prints; 1 where a benchmark gave no figure.</summary>

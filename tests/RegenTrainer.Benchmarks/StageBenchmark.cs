@@ -5,6 +5,7 @@ using RegenTrainer.Core.Regeneration;
 using RegenTrainer.Core.Stages;
 using RegenTrainer.Core.Tuning;
 using RegenTrainer.Files;
+using RegenTrainer.Session;
 
 namespace RegenTrainer.Benchmarks;
 
@@ -12,20 +13,17 @@ namespace RegenTrainer.Benchmarks;
 [MemoryDiagnoser(false)]
 public class StageBenchmark
 {
-    private const int DialPoints = 60;
-
     private readonly StageWorkspace _workspace;
     private readonly TankQuery _query = new(1e6, DialMode.Follows, 0, 2000, 20, Grade.Typical, null, null);
     private TankHint _hint;
     private double _ohm = 2000;
-    private readonly StageWorkspace[] _threads;
-    private readonly DialPoint[] _dial = new DialPoint[3 * DialPoints];
+    private readonly StageRequest _dial;
 
     public StageBenchmark()
     {
         _workspace = new StageWorkspace(StageModel.Compile(Presets.Read(Presets.Default)));
         _hint = TankHint.From(TankSolver.Solve(_workspace, _query, TankHint.None));
-        _threads = [new StageWorkspace(_workspace.Model), new StageWorkspace(_workspace.Model)];
+        _dial = DialSweep.Request(new StageSolver(_workspace.Model, StageReader.DefaultAudioHz), new Setting(1e6, 50));
     }
 
     /// <summary>One step of the control (2 % of its resistance), operating point and tank mode solved again from the last.</summary>
@@ -55,18 +53,7 @@ public class StageBenchmark
         return StageReader.Read(_workspace, new Setting(1e6, 50), StageReader.DefaultAudioHz);
     }
 
-    /// <summary>The dial with weak, typical and strong devices at 60 points each, on two threads.</summary>
+    /// <summary>What the Dial page asks for: weak, typical and strong devices at 60 points each, on the threads there are.</summary>
     [Benchmark]
-    public int DialThreeGrades()
-    {
-        Parallel.For(0, _threads.Length, thread =>
-        {
-            for (int k = thread; k < _dial.Length; k += _threads.Length)
-            {
-                Grade grade = (Grade)(k / DialPoints);
-                _dial[k] = DialRun.At(_threads[thread], new Setting(530e3 + (k % DialPoints * 19.5e3), 50) { Grade = grade });
-            }
-        });
-        return _dial.Length;
-    }
+    public DialCurves DialThreeGrades() => DialSweep.Run(_dial);
 }

@@ -49,7 +49,7 @@ public sealed partial class TerminalTests
         foreach ((int columns, int rows) in new[] { (80, 24), (140, 45), (100, 30) })
         {
             terminal.Resize(columns, rows);
-            Thread.Sleep(500);
+            Thread.Sleep(300);
             terminal.WaitFor("Stage");
             Fits(terminal, columns, rows);
         }
@@ -84,7 +84,7 @@ public sealed partial class TerminalTests
         {
             terminal.Resize(columns, rows);
             terminal.WaitFor(shown);
-            Thread.Sleep(700);
+            Thread.Sleep(300);
             terminal.WaitWithout("...");
             Fits(terminal, columns, rows);
             string screen = string.Join('\n', terminal.Lines);
